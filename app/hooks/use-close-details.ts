@@ -1,0 +1,30 @@
+import { type RefObject, useEffect } from "react";
+import { useLocation } from "react-router";
+
+/** Closes an open `<details>` on Escape, on a press outside it, and when the page changes. */
+export function useCloseDetails(ref: RefObject<HTMLDetailsElement | null>) {
+  const { pathname } = useLocation();
+  // biome-ignore lint/correctness/useExhaustiveDependencies: runs when the path changes, whatever the path is.
+  useEffect(() => {
+    ref.current?.removeAttribute("open");
+  }, [pathname]);
+
+  useEffect(() => {
+    function onKey(event: KeyboardEvent) {
+      const details = ref.current;
+      if (event.key !== "Escape" || !details?.open) return;
+      details.open = false;
+      details.querySelector("summary")?.focus();
+    }
+    function onPress(event: PointerEvent) {
+      const details = ref.current;
+      if (details?.open && !details.contains(event.target as Node)) details.open = false;
+    }
+    document.addEventListener("keydown", onKey);
+    document.addEventListener("pointerdown", onPress);
+    return () => {
+      document.removeEventListener("keydown", onKey);
+      document.removeEventListener("pointerdown", onPress);
+    };
+  }, [ref]);
+}
