@@ -1,0 +1,29 @@
+import { checkNodeVersion } from "./check-node-version.mjs";
+import { installDebianPackages } from "./debian-packages.mjs";
+import { installNodePackages } from "./node-packages.mjs";
+import { endCommands } from "./run-command.mjs";
+import { sayWhyItStops } from "./stop-sentence.mjs";
+
+/**
+ * Everything that must be there before TypeScript can run, then the rest of the command.
+ * @param {{ debian: ("mariadb-server" | "chromium")[], main: () => Promise<number> }} options main gives the exit code
+ */
+export async function withSetUp({ debian, main }) {
+  const stop = async () => {
+    await endCommands();
+    process.exit(143);
+  };
+  process.on("SIGTERM", stop).on("SIGINT", stop);
+  try {
+    checkNodeVersion();
+    await installDebianPackages(debian);
+    await installNodePackages();
+    const { register } = await import("tsx/esm/api");
+    register();
+    process.off("SIGTERM", stop).off("SIGINT", stop);
+    process.exitCode = await main();
+  } catch (error) {
+    sayWhyItStops(error);
+    process.exitCode = 1;
+  }
+}
