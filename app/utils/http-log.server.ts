@@ -15,7 +15,10 @@ export function describeError(error: unknown): Record<string, unknown> {
   if (!(error instanceof Error)) return { name: typeof error };
   const frames = (error.stack ?? "").split("\n").filter((line) => line.trimStart().startsWith("at "));
   const parent = (error as { parent?: { code?: string; errno?: number } }).parent;
-  const described: Record<string, unknown> = { name: error.name, frames: frames.slice(0, 12).map((line) => line.trim()) };
+  const described: Record<string, unknown> = {
+    name: error.name,
+    frames: frames.slice(0, 12).map((line) => line.trim()),
+  };
   if (error.name.startsWith("Sequelize") || error.name === "SqlError") {
     described.code = parent?.code ?? (error as { code?: string }).code;
   } else {

@@ -46,14 +46,21 @@ export function isFault(error: unknown): boolean {
 export function toProblem(error: unknown, requestId?: string): Problem {
   if (error instanceof AppError) {
     const { status, title } = KINDS[error.code];
-    const problem: Problem = { type: `urn:cotterpin:problem:${error.code}`, title, status, detail: error.message };
+    const problem: Problem = {
+      type: `urn:cotterpin:problem:${error.code}`,
+      title,
+      status,
+      detail: error.message,
+    };
     if (error.errors.length > 0) problem.errors = error.errors;
     if (status === 429 || status === 503) problem.retryAfter = error.retryAfter ?? DEFAULT_RETRY_SECONDS;
     return problem;
   }
   if (isPassingFault(error)) {
     return {
-      ...toProblem(new AppError("busy", "The database does not answer just now. Try again in a few seconds.")),
+      ...toProblem(
+        new AppError("busy", "The database does not answer just now. Try again in a few seconds."),
+      ),
       requestId,
     };
   }
@@ -61,7 +68,8 @@ export function toProblem(error: unknown, requestId?: string): Problem {
     type: "urn:cotterpin:problem:fault",
     title: "Something went wrong here",
     status: 500,
-    detail: "This is a fault in the program, not in what you sent. Nothing was changed; try again, and if it stays, tell whoever looks after Cotterpin the request number.",
+    detail:
+      "This is a fault in the program, not in what you sent. Nothing was changed; try again, and if it stays, tell whoever looks after Cotterpin the request number.",
     requestId,
   };
 }
@@ -69,7 +77,10 @@ export function toProblem(error: unknown, requestId?: string): Problem {
 /** The HTTP answer for a problem: `application/problem+json`, with `Retry-After` where it helps. */
 export function problemResponse(problem: Problem): Response {
   const { retryAfter, ...body } = problem;
-  const headers = new Headers({ "Content-Type": "application/problem+json; charset=utf-8", "Cache-Control": "no-store" });
+  const headers = new Headers({
+    "Content-Type": "application/problem+json; charset=utf-8",
+    "Cache-Control": "no-store",
+  });
   if (retryAfter !== undefined) headers.set("Retry-After", String(retryAfter));
   return new Response(JSON.stringify(body), { status: problem.status, headers });
 }

@@ -14,7 +14,7 @@ export const PERMISSIONS: Readonly<Record<Act, readonly Role[]>> = {
   move: ["clerk", "purchaser"],
   "print-labels": ["clerk", "purchaser"],
   adjust: ["clerk"],
-  scrap: ["clerk", "builder"],
+  scrap: ["clerk"],
   hold: ["clerk", "purchaser", "builder"],
   "pass-inspection": ["clerk"],
   "release-hold": [],
@@ -33,6 +33,7 @@ export const PERMISSIONS: Readonly<Record<Act, readonly Role[]>> = {
   "kit-orders": ["planner"],
   "shop-orders": ["planner"],
   "approve-alternate": ["planner"],
+  /** Picking, finishing, returning and scrapping at the bench. */
   pick: ["builder"],
   purchasing: ["purchaser"],
   "approve-purchase": [],

@@ -1,0 +1,3 @@
+import { publicLoader } from "~/services/people/guard.server";
+
+export const loader = publicLoader(() => Response.json({ status: "ok" }));
