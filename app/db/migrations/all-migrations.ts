@@ -1,0 +1,17 @@
+import { createOrders } from "./create-orders";
+import { createParts } from "./create-parts";
+import { createPeople } from "./create-people";
+import { createStock } from "./create-stock";
+import { createSystem } from "./create-system";
+import type { Migration } from "./migration";
+import { refuseChangedFacts } from "./refuse-changed-facts";
+
+/** In the order in which they run. A list, because file names differ between source and build. */
+export const ALL_MIGRATIONS: readonly Migration[] = [
+  createPeople,
+  createSystem,
+  createParts,
+  createStock,
+  createOrders,
+  refuseChangedFacts,
+];

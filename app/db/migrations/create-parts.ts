@@ -1,0 +1,68 @@
+import type { Migration } from "./migration";
+import { CREATED_AT, EXACT, ID, TABLE } from "./table-options";
+
+export const createParts: Migration = {
+  name: "0003-create-parts",
+  statements: [
+    `CREATE TABLE IF NOT EXISTS part (
+      ${ID},
+      part_number VARCHAR(120) NOT NULL,
+      part_key VARCHAR(120) ${EXACT} NOT NULL,
+      description VARCHAR(255) NOT NULL DEFAULT '',
+      sourcing ENUM('buy','make','phantom') NOT NULL,
+      unit VARCHAR(8) ${EXACT} NOT NULL DEFAULT 'EA',
+      decimals TINYINT UNSIGNED NOT NULL DEFAULT 0,
+      lead_time_days INT UNSIGNED NOT NULL DEFAULT 0,
+      safety_stock DECIMAL(20,6) NOT NULL DEFAULT 0,
+      lot_rule ENUM('lot-for-lot','fixed-period') NOT NULL DEFAULT 'lot-for-lot',
+      lot_minimum DECIMAL(20,6) NULL,
+      lot_multiple DECIMAL(20,6) NULL,
+      lot_maximum DECIMAL(20,6) NULL,
+      lot_days INT UNSIGNED NULL,
+      yield DECIMAL(9,8) NOT NULL DEFAULT 1,
+      unit_cost DECIMAL(20,6) NULL,
+      mass_kg DECIMAL(20,9) NULL,
+      sold BOOLEAN NOT NULL DEFAULT FALSE,
+      version INT UNSIGNED NOT NULL DEFAULT 1,
+      ${CREATED_AT},
+      UNIQUE KEY part_part_key (part_key),
+      CONSTRAINT part_key_not_empty CHECK (part_key <> ''),
+      CONSTRAINT part_decimals CHECK (decimals <= 6),
+      CONSTRAINT part_safety_stock CHECK (safety_stock >= 0),
+      CONSTRAINT part_lot_minimum CHECK (lot_minimum >= 0),
+      CONSTRAINT part_lot_multiple CHECK (lot_multiple >= 0),
+      CONSTRAINT part_lot_maximum CHECK (lot_maximum >= 0),
+      CONSTRAINT part_yield CHECK (yield > 0 AND yield <= 1),
+      CONSTRAINT part_unit_cost CHECK (unit_cost >= 0),
+      CONSTRAINT part_mass_kg CHECK (mass_kg >= 0)
+    ) ${TABLE}`,
+    `CREATE TABLE IF NOT EXISTS kit_option (
+      ${ID},
+      code VARCHAR(60) ${EXACT} NOT NULL,
+      description VARCHAR(255) NOT NULL DEFAULT '',
+      UNIQUE KEY kit_option_code (code)
+    ) ${TABLE}`,
+    `CREATE TABLE IF NOT EXISTS structure_line (
+      ${ID},
+      parent_id BIGINT UNSIGNED NOT NULL,
+      component_id BIGINT UNSIGNED NOT NULL,
+      position INT UNSIGNED NOT NULL,
+      quantity DECIMAL(20,6) NULL,
+      scrap DECIMAL(9,8) NOT NULL DEFAULT 0,
+      find_number VARCHAR(40) NULL,
+      option_code VARCHAR(60) ${EXACT} NULL,
+      from_serial VARCHAR(60) ${EXACT} NULL,
+      to_serial VARCHAR(60) ${EXACT} NULL,
+      from_date DATE NULL,
+      to_date DATE NULL,
+      KEY structure_line_parent (parent_id, position),
+      KEY structure_line_component (component_id, parent_id),
+      CONSTRAINT structure_line_parent_part FOREIGN KEY (parent_id) REFERENCES part (id),
+      CONSTRAINT structure_line_component_part FOREIGN KEY (component_id) REFERENCES part (id),
+      CONSTRAINT structure_line_option FOREIGN KEY (option_code) REFERENCES kit_option (code),
+      CONSTRAINT structure_line_not_itself CHECK (parent_id <> component_id),
+      CONSTRAINT structure_line_quantity CHECK (quantity > 0),
+      CONSTRAINT structure_line_scrap CHECK (scrap >= 0 AND scrap < 1)
+    ) ${TABLE}`,
+  ],
+};
