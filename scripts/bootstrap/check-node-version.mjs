@@ -7,5 +7,7 @@ const needed = [20, 12];
 export function checkNodeVersion(version = process.versions.node) {
   const [major, minor] = version.split(".").map(Number);
   if (major > needed[0] || (major === needed[0] && minor >= needed[1])) return;
-  throw new StopSentence(`Cotterpin needs Node.js ${needed.join(".")} or newer, and this is ${version}: install a newer one and start again.`);
+  throw new StopSentence(
+    `Cotterpin needs Node.js ${needed.join(".")} or newer, and this is ${version}: install a newer one and start again.`,
+  );
 }

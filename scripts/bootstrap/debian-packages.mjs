@@ -50,7 +50,9 @@ export async function installDebianPackages(names) {
   await install(apt, missing);
   const still = names.filter((name) => packages[name].some((program) => !findProgram(program)));
   if (still.length > 0) {
-    throw new StopSentence(`Installing ${still.join(" and ")} did not work: run "apt-get install ${still.join(" ")}" by hand to see why.`);
+    throw new StopSentence(
+      `Installing ${still.join(" and ")} did not work: run "apt-get install ${still.join(" ")}" by hand to see why.`,
+    );
   }
 }
 

@@ -6,7 +6,14 @@ import { findProgram } from "../bootstrap/debian-packages.mjs";
 export function askAsAdmin(socket: string, statements: string): Promise<string> {
   const client = spawn(
     findProgram("mariadb") ?? "mariadb",
-    ["--no-defaults", "--protocol=socket", `--socket=${socket}`, `--user=${os.userInfo().username}`, "--batch", "--skip-column-names"],
+    [
+      "--no-defaults",
+      "--protocol=socket",
+      `--socket=${socket}`,
+      `--user=${os.userInfo().username}`,
+      "--batch",
+      "--skip-column-names",
+    ],
     { stdio: "pipe" },
   );
   let output = "";

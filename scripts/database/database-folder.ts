@@ -38,7 +38,9 @@ function socketPath(folder: string): string {
   mkdirSync(short, { recursive: true, mode: 0o700 });
   const found = lstatSync(short);
   if (!found.isDirectory() || found.uid !== process.getuid?.()) {
-    throw new Error(`The folder ${short} belongs to somebody else, so the database socket cannot be put there.`);
+    throw new Error(
+      `The folder ${short} belongs to somebody else, so the database socket cannot be put there.`,
+    );
   }
   return path.join(short, "mariadb.sock");
 }

@@ -37,7 +37,10 @@ function setAside(data: string): void {
 
 async function install(data: string): Promise<void> {
   const program = findProgram("mariadb-install-db");
-  if (!program) throw new StopSentence('The program mariadb-install-db is missing: install the Debian package mariadb-server and start again.');
+  if (!program)
+    throw new StopSentence(
+      "The program mariadb-install-db is missing: install the Debian package mariadb-server and start again.",
+    );
   const user = os.userInfo().username;
   // The installer is a shell script that stumbles over some paths: it is given a relative one.
   const { code, output } = await runCommand(
@@ -50,7 +53,11 @@ async function install(data: string): Promise<void> {
       `--auth-root-socket-user=${user}`,
       "--skip-test-db",
     ],
-    { output: "quiet", cwd: path.dirname(data), env: { ...process.env, PATH: `${process.env.PATH}:/usr/sbin:/sbin` } },
+    {
+      output: "quiet",
+      cwd: path.dirname(data),
+      env: { ...process.env, PATH: `${process.env.PATH}:/usr/sbin:/sbin` },
+    },
   );
   if (code === 0) return;
   rmSync(data, { recursive: true, force: true });

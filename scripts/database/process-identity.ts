@@ -10,7 +10,9 @@ export interface ProcessIdentity {
 export function identify(pid: number): ProcessIdentity | undefined {
   try {
     // The name in parentheses may hold spaces; what follows it does not.
-    const fields = readFileSync(`/proc/${pid}/stat`, "utf8").replace(/^.*\) /s, "").split(" ");
+    const fields = readFileSync(`/proc/${pid}/stat`, "utf8")
+      .replace(/^.*\) /s, "")
+      .split(" ");
     return fields[0] === "Z" ? undefined : { pid, born: fields[19] };
   } catch {
     return undefined;

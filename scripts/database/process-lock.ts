@@ -11,7 +11,9 @@ export interface LockHolder extends ProcessIdentity {
  * Takes the lock, or tells who has it. It is a file that names a process, so a server started under it does not
  * inherit it, and one left by a process that is gone does not count.
  */
-export function takeLock(file: string): { taken: true; note(text: string): void; release(): void } | { taken: false; holder: LockHolder } {
+export function takeLock(
+  file: string,
+): { taken: true; note(text: string): void; release(): void } | { taken: false; holder: LockHolder } {
   const self = identify(process.pid) ?? { pid: process.pid, born: "" };
   const own = `${file}.${process.pid}`;
   for (;;) {
@@ -19,7 +21,11 @@ export function takeLock(file: string): { taken: true; note(text: string): void;
     try {
       linkSync(own, file);
       rmSync(own);
-      return { taken: true, note: (note) => writeNote(file, { ...self, note }), release: () => rmSync(file, { force: true }) };
+      return {
+        taken: true,
+        note: (note) => writeNote(file, { ...self, note }),
+        release: () => rmSync(file, { force: true }),
+      };
     } catch (error) {
       rmSync(own, { force: true });
       if ((error as NodeJS.ErrnoException).code !== "EEXIST") throw error;

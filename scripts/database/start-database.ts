@@ -40,11 +40,17 @@ export async function startDatabase(folderPath: string, options: { durable: bool
 
 async function launch(folder: DatabaseFolder, durable: boolean): Promise<RunningServer> {
   const program = findProgram("mariadbd");
-  if (!program) throw new StopSentence("The program mariadbd is missing: install the Debian package mariadb-server and start again.");
+  if (!program)
+    throw new StopSentence(
+      "The program mariadbd is missing: install the Debian package mariadb-server and start again.",
+    );
   const log = openSync(folder.log, "a", 0o600);
   const port = await findFreePort();
   // A group of its own: Ctrl-C at the terminal reaches the starter, which stops the server last.
-  const child = spawn(program, serverArguments(folder, port, durable), { detached: true, stdio: ["ignore", log, log] });
+  const child = spawn(program, serverArguments(folder, port, durable), {
+    detached: true,
+    stdio: ["ignore", log, log],
+  });
   closeSync(log);
   child.on("error", () => {});
   child.unref();
