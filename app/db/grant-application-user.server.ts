@@ -37,7 +37,8 @@ async function grantAtHost(sequelize: Sequelize, account: string, tables: string
   try {
     for (const table of tables) {
       const appendOnly = (APPEND_ONLY_TABLES as readonly string[]).includes(table);
-      const rights = appendOnly ? "SELECT, INSERT" : "SELECT, INSERT, UPDATE, DELETE";
+      const rights =
+        table === "migration" ? "SELECT" : appendOnly ? "SELECT, INSERT" : "SELECT, INSERT, UPDATE, DELETE";
       await sequelize.query(`GRANT ${rights} ON \`${table}\` TO ${account}`);
     }
     return true;

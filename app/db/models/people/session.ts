@@ -1,0 +1,28 @@
+import {
+  type CreationOptional,
+  DataTypes,
+  type InferAttributes,
+  type InferCreationAttributes,
+  Model,
+} from "sequelize";
+import { sequelize } from "~/db/client.server";
+
+/** A signed-in browser, keyed by the hash of its id. */
+export class Session extends Model<InferAttributes<Session>, InferCreationAttributes<Session>> {
+  declare idHash: string;
+  declare personId: number;
+  declare createdAt: CreationOptional<Date>;
+  declare seenAt: CreationOptional<Date>;
+  declare expiresAt: Date;
+}
+
+Session.init(
+  {
+    idHash: { type: DataTypes.STRING(64), primaryKey: true, allowNull: false },
+    personId: { type: DataTypes.BIGINT.UNSIGNED, allowNull: false },
+    createdAt: DataTypes.DATE(3),
+    seenAt: DataTypes.DATE(3),
+    expiresAt: { type: DataTypes.DATE(3), allowNull: false },
+  },
+  { sequelize, tableName: "session" },
+);
