@@ -79,7 +79,12 @@ export type StructureProblem =
   | { code: "loop"; line: number; loop: string[] }
   | { code: "unknown-part"; line: number; column: "parent" | "component"; partNumber: string }
   | { code: "duplicate-part"; part: number; partNumber: string }
-  | { code: "condition-not-allowed"; line: number; column: "option" | "from_serial" | "to_serial" | "from_date" | "to_date"; parent: string };
+  | {
+      code: "condition-not-allowed";
+      line: number;
+      column: "option" | "from_serial" | "to_serial" | "from_date" | "to_date";
+      parent: string;
+    };
 
 /** What a demand cannot be planned with; `demand` is an index into the demands given. */
 export type DemandProblem =

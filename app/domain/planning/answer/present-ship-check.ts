@@ -1,0 +1,136 @@
+import { formatSteps } from "../../quantity/format-steps";
+import type { Steps } from "../../quantity/steps";
+import { isoDate } from "../dates/day-number";
+import { NEVER } from "../dates/need-dates";
+import type { Amounts } from "../netting/pass-state";
+import type { ShipPlan } from "../plan-ship";
+import { MAKE } from "../structure/structure";
+import type { Debt, IsoDate, Rung, ShipCheck, Shortage } from "../types";
+import { findWarnings } from "./find-warnings";
+import { sumCost } from "./sum-cost";
+
+/** The plan as the contracts of command line and HTTP give it (DESIGN.md; PLANNING.md, sections 4 and 5). */
+export function presentShipCheck(plan: ShipPlan): ShipCheck {
+  const { supplies, demand, buildable, earliest, served } = plan;
+  return {
+    today: isoDate(supplies.today),
+    demand: demand.map((one, at) => ({
+      partNumber: partNumberOf(plan, at),
+      quantity: one.quantity,
+      due: one.due,
+      options: [...one.options],
+      serial: one.serial,
+      buildable: asNumber(buildable[at]),
+      earliest: isoDate(earliest[at]),
+    })),
+    ...totalsByKit(plan),
+    ladder: presentLadder(plan),
+    shortages: presentShortages(plan),
+    builds: presentBuilds(plan),
+    criticalChain: served.chain,
+    ...(plan.debts ? { debts: presentDebts(plan) } : {}),
+    warnings: findWarnings(plan),
+  };
+}
+
+function partNumberOf(plan: ShipPlan, demand: number): string {
+  const segment = plan.segments.find((one) => one.demand === demand);
+  return plan.structure.parts[segment?.part ?? 0].partNumber;
+}
+
+function asNumber(count: Steps | null): number | null {
+  return count === null ? null : Number(count);
+}
+
+/** For each kit the sum of its demands' kits and the latest of their dates. */
+function totalsByKit(plan: ShipPlan): Pick<ShipCheck, "buildable" | "earliest"> {
+  const counts = new Map<string, number | null>();
+  const days = new Map<string, IsoDate>();
+  plan.demand.forEach((_, at) => {
+    const kit = partNumberOf(plan, at);
+    const own = asNumber(plan.buildable[at]);
+    const sum = counts.get(kit) ?? 0;
+    counts.set(kit, own === null || (counts.has(kit) && counts.get(kit) === null) ? null : sum + own);
+    const day = isoDate(plan.earliest[at]);
+    if (day > (days.get(kit) ?? "")) days.set(kit, day);
+  });
+  return { buildable: Object.fromEntries(counts), earliest: Object.fromEntries(days) };
+}
+
+function presentLadder({ structure, served }: ShipPlan): Rung[] {
+  return served.rungs.map((rung) => ({
+    partNumber: structure.parts[rung.part].partNumber,
+    kits: rung.kits,
+    cost: sumCost(structure, rung.short),
+    readyOn: isoDate(rung.readyOn),
+    stoppers: rung.stoppers
+      .map(({ part, missing }) => ({
+        partNumber: structure.parts[part].partNumber,
+        missing: formatSteps(missing, structure.decimals[part]),
+      }))
+      .sort(byPartNumber),
+  }));
+}
+
+function presentShortages(plan: ShipPlan): Shortage[] {
+  const { structure, served } = plan;
+  const { now, coming, ready, stopsAt, needBy } = served;
+  const shortages: Shortage[] = [];
+  for (const [part, first] of stopsAt) {
+    const say = (amounts: Amounts) => formatSteps(amounts[part], structure.decimals[part]);
+    shortages.push({
+      partNumber: structure.parts[part].partNumber,
+      unit: structure.parts[part].unit,
+      gross: say(coming.gross),
+      fromStock: say(coming.fromStock),
+      onOrder: say(coming.onOrder),
+      short: say(coming.net),
+      missing: say(now.net),
+      stopsAt: Number(first),
+      needBy: needBy[part] === NEVER ? null : isoDate(needBy[part]),
+      orderBy: orderBy(plan, part),
+      readyOn: isoDate(ready[part]),
+    });
+  }
+  return shortages.sort(byPartNumber);
+}
+
+/** The earliest over the demands that are short of the part: today without a date (section 5). */
+function orderBy({ structure, supplies, served }: ShipPlan, part: number): IsoDate | null {
+  const days: number[] = [];
+  if (served.shortUndated[part]) days.push(supplies.today);
+  if (served.shortDated[part]) days.push(served.needBy[part] - structure.leadTime[part]);
+  return days.length > 0 ? isoDate(Math.min(...days)) : null;
+}
+
+function presentBuilds({ structure, served }: ShipPlan): ShipCheck["builds"] {
+  const { gross, fromStock, onOrder, start } = served.coming;
+  const builds: ShipCheck["builds"] = [];
+  for (let p = 0; p < structure.parts.length; p++) {
+    if (structure.sourcing[p] !== MAKE || structure.leaf[p] || !(start[p] > 0)) continue;
+    const say = (amounts: Amounts) => formatSteps(amounts[p], structure.decimals[p]);
+    builds.push({
+      partNumber: structure.parts[p].partNumber,
+      unit: structure.parts[p].unit,
+      gross: say(gross),
+      fromStock: say(fromStock),
+      onOrder: say(onOrder),
+      build: say(start),
+    });
+  }
+  return builds.sort(byPartNumber);
+}
+
+function presentDebts({ structure, debts }: ShipPlan): Debt[] {
+  return (debts ?? []).map(({ part, quantity, from, to }) => ({
+    partNumber: structure.parts[part].partNumber,
+    quantity: formatSteps(quantity, structure.decimals[part]),
+    from: from + 1,
+    to: to + 1,
+  }));
+}
+
+/** Binary order; JavaScript compares UTF-16 units, which differs only past the basic plane. */
+function byPartNumber(a: { partNumber: string }, b: { partNumber: string }): number {
+  return a.partNumber < b.partNumber ? -1 : a.partNumber > b.partNumber ? 1 : 0;
+}

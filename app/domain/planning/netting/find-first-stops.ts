@@ -1,0 +1,37 @@
+import type { Steps } from "../../quantity/steps";
+import { addSteps, narrowSteps } from "../../quantity/steps";
+import type { Lane, Offer } from "./lane";
+import { tryKits } from "./lane";
+import type { Segment } from "./split-demand";
+
+/**
+ * For parts that the segment lacks only past the rungs drawn: the first kit each one stops, by halving.
+ * The lane's last try must be the whole segment. Writes into `stopsAt`, counting from `served`.
+ */
+export function findFirstStops(
+  lane: Lane,
+  offer: Offer,
+  segment: Segment,
+  rungs: number,
+  served: Steps,
+  stopsAt: Map<number, Steps>,
+): void {
+  const { leaf } = lane.structure;
+  const lacking: number[] = [];
+  for (let p = 0; p < leaf.length; p++) {
+    if (leaf[p] && lane.next.net[p] > 0 && !stopsAt.has(p)) lacking.push(p);
+  }
+  const open = [{ low: BigInt(rungs), high: BigInt(segment.kits), parts: lacking }];
+  for (let range = open.pop(); range; range = open.pop()) {
+    const { low, high, parts } = range;
+    if (parts.length === 0) continue;
+    if (high - low === 1n) {
+      for (const part of parts) stopsAt.set(part, addSteps(served, narrowSteps(high)));
+      continue;
+    }
+    const middle = (low + high) / 2n;
+    const { net } = tryKits(lane, offer, segment, narrowSteps(middle));
+    open.push({ low, high: middle, parts: parts.filter((p) => net[p] > 0) });
+    open.push({ low: middle, high, parts: parts.filter((p) => !(net[p] > 0)) });
+  }
+}

@@ -1,0 +1,101 @@
+import type { Structure } from "../structure/structure";
+import { PHANTOM } from "../structure/structure";
+import type { Engine, PassInput, PassState } from "./pass-state";
+
+const MOST = Number.MAX_SAFE_INTEGER;
+
+/** Netting in doubles, exact below 2^53 (PLANNING.md, section 3). */
+export const numberEngine: Engine = {
+  zeros: (length) => new Float64Array(length),
+  from: (value) => Number(value),
+  run: runPass,
+};
+
+interface NumberState extends PassState {
+  gross: Float64Array;
+  fromStock: Float64Array;
+  onOrder: Float64Array;
+  net: Float64Array;
+  start: Float64Array;
+  throughLine: Float64Array;
+}
+
+/**
+ * One pass: parents before components, each part once, each line once. Requirements are worked out from
+ * the whole parent quantity so far, so rounding up happens once a line however the kits are asked for.
+ */
+function runPass(structure: Structure, input: PassInput, state: PassState): boolean {
+  const out = state as NumberState;
+  const base = input.base as NumberState;
+  const { leaf, sourcing, yieldNum, yieldDen, open } = structure;
+  const { starts, component, num, den } = structure.fixed;
+  const { gross, fromStock, onOrder, net, start } = out;
+  const stock = input.stock as Float64Array;
+  const supply = input.supply as Float64Array | null;
+  gross.fill(0);
+  out.throughLine.set(base.throughLine);
+  for (const [part, quantity] of base.asked) gross[part] = quantity as number;
+  gross[input.part] += Number(input.quantity);
+  out.asked = new Map(base.asked).set(input.part, gross[input.part]);
+  const hasConditions = structure.conditional.component.length > 0;
+  for (let p = 0; p < gross.length; p++) {
+    const need = gross[p];
+    if (need === 0) {
+      fromStock[p] = onOrder[p] = net[p] = start[p] = 0;
+      continue;
+    }
+    if (need > MOST) return false;
+    const added = need - base.gross[p];
+    const taken = Math.min(added, stock[p]);
+    let left = added - taken;
+    fromStock[p] = base.fromStock[p] + taken;
+    if (supply !== null) {
+      const ordered = Math.min(left, supply[p]);
+      onOrder[p] = base.onOrder[p] + ordered;
+      left -= ordered;
+    } else onOrder[p] = 0;
+    const rest = base.net[p] + left;
+    net[p] = rest;
+    if (leaf[p] === 1 || rest === 0) {
+      start[p] = 0;
+      continue;
+    }
+    const begin = sourcing[p] === PHANTOM ? rest : timesRatio(rest, yieldNum[p], yieldDen[p]);
+    if (begin > MOST) return false;
+    start[p] = begin;
+    for (let k = starts[p], end = starts[p + 1]; k < end; k++) {
+      gross[component[k]] += den[k] === 1 ? begin * num[k] : timesRatio(begin, num[k], den[k]);
+    }
+    if (hasConditions && open[p] === 1) addConditional(structure, input, base, out, p);
+  }
+  return true;
+}
+
+/** ceil(quantity x num / den); infinity where doubles cannot say it. */
+function timesRatio(quantity: number, num: number, den: number): number {
+  const product = quantity * num;
+  if (product <= MOST) {
+    const rest = product % den;
+    return (product - rest) / den + (rest > 0 ? 1 : 0);
+  }
+  if (num === Number.POSITIVE_INFINITY) return num;
+  const wide = (BigInt(quantity) * BigInt(num) + BigInt(den) - 1n) / BigInt(den);
+  return wide > MOST ? Number.POSITIVE_INFINITY : Number(wide);
+}
+
+/** Conditional lines see only the parents of kits for which they count. */
+function addConditional(
+  structure: Structure,
+  input: PassInput,
+  base: NumberState,
+  out: NumberState,
+  part: number,
+): void {
+  const { starts, component, num, den } = structure.conditional;
+  const added = out.start[part] - base.start[part];
+  for (let k = starts[part]; k < starts[part + 1]; k++) {
+    const through = base.throughLine[k] + (input.active[k] === 1 ? added : 0);
+    out.throughLine[k] = through;
+    out.gross[component[k]] += timesRatio(through, num[k], den[k]);
+  }
+}

@@ -1,0 +1,121 @@
+import type { Steps } from "../quantity/steps";
+import { addSteps } from "../quantity/steps";
+import type { Supplies } from "./compile-supplies";
+import { countBeyond } from "./netting/count-shippable";
+import type { PartDebt } from "./netting/find-debts";
+import { findDebts } from "./netting/find-debts";
+import { OutOfRange } from "./netting/lane";
+import { isLimited } from "./netting/limits";
+import type { Engine } from "./netting/pass-state";
+import { numberEngine } from "./netting/run-pass";
+import { wideEngine } from "./netting/run-wide-pass";
+import type { Served } from "./netting/serve-demands";
+import { serveDemands } from "./netting/serve-demands";
+import { releaseOrder, stockTakenByDemand } from "./netting/serve-released";
+import type { Segment, SplitDemand } from "./netting/split-demand";
+import { splitDemand } from "./netting/split-demand";
+import type { Structure } from "./structure/structure";
+import type { DemandProblem, PlanDemand, Sharing } from "./types";
+
+export interface PlanShipInput {
+  structure: Structure;
+  supplies: Supplies;
+  /** In the order of service, at least one. */
+  demand: readonly PlanDemand[];
+  sharing: Sharing;
+}
+
+/** The plan in whole steps and numbers of the structure; `presentShipCheck` makes the answer of it. */
+export interface ShipPlan {
+  structure: Structure;
+  supplies: Supplies;
+  demand: readonly PlanDemand[];
+  /** In the order in which they were served. */
+  segments: Segment[];
+  served: Served;
+  /** Complete kits by demand; null where nothing limits them. */
+  buildable: (Steps | null)[];
+  /** Day by demand. */
+  earliest: number[];
+  /** Only with `release`. */
+  debts: PartDebt[] | null;
+}
+
+export type PlanShipResult = { ok: true; plan: ShipPlan } | { ok: false; problems: DemandProblem[] };
+
+/**
+ * Plans the demands over the structure: now and coming, ladder, dates, debts. Exact: in doubles as long
+ * as every quantity stays below 2^53 steps, else all of it in BigInt.
+ */
+export function planShip(input: PlanShipInput): PlanShipResult {
+  const { structure, supplies, demand } = input;
+  const results = demand.map((one, index) => splitDemand(structure, one, index, supplies.today));
+  const problems = results.flatMap((result) => (result.ok ? [] : [result.problem]));
+  if (problems.length > 0) return { ok: false, problems };
+  const splits = results.flatMap((result) => (result.ok ? [result.split] : []));
+  const isWide =
+    supplies.wide || splits.some((split) => split.segments.some(({ kits }) => typeof kits === "bigint"));
+  if (isWide) return { ok: true, plan: plan(input, splits, wideEngine) };
+  try {
+    return { ok: true, plan: plan(input, splits, numberEngine) };
+  } catch (error) {
+    if (!(error instanceof OutOfRange)) throw error;
+    return { ok: true, plan: plan(input, splits, wideEngine) };
+  }
+}
+
+function plan(input: PlanShipInput, splits: readonly SplitDemand[], engine: Engine): ShipPlan {
+  const { structure, supplies, demand, sharing } = input;
+  const asked = splits.flatMap((split) => split.segments);
+  const release = sharing === "release" ? releaseOrder(structure, supplies, splits, engine) : null;
+  const segments = release ? release.segments : asked;
+  const served = serveDemands(structure, supplies, segments, engine);
+  const takenBy = (order: Segment[]) => stockTakenByDemand(structure, supplies, order, demand.length, engine);
+  return {
+    structure,
+    supplies,
+    demand,
+    segments,
+    served,
+    buildable: markEndless(structure, splits, release?.buildable ?? strictBuildable(splits, served)),
+    earliest: latestByDemand(segments, served.earliest, demand.length),
+    debts: release ? findDebts(takenBy(asked), takenBy(segments)) : null,
+  };
+}
+
+/** Each demand up to its quantity, since others are served after it; the last one as far as it goes. */
+function strictBuildable(splits: readonly SplitDemand[], served: Served): (Steps | null)[] {
+  let at = 0;
+  return splits.map((split, index) => {
+    let sum: Steps = 0;
+    let complete = true;
+    for (const segment of split.segments) {
+      const kits = served.shippable[at++];
+      complete &&= kits === segment.kits;
+      sum = addSteps(sum, kits);
+    }
+    if (!complete || index < splits.length - 1) return sum;
+    const more = countBeyond(served.lanes.now, split.beyond);
+    return more === null ? null : addSteps(sum, more);
+  });
+}
+
+/** A kit that nothing limits has no number, wherever it stands in the order of service. */
+function markEndless(
+  structure: Structure,
+  splits: readonly SplitDemand[],
+  buildable: (Steps | null)[],
+): (Steps | null)[] {
+  return buildable.map((count, index) => {
+    const all = [...splits[index].segments, ...splits[index].beyond];
+    return all.some(({ part, active }) => isLimited(structure, part, active)) ? count : null;
+  });
+}
+
+function latestByDemand(segments: readonly Segment[], days: readonly number[], demands: number): number[] {
+  const latest = new Array<number>(demands).fill(Number.NEGATIVE_INFINITY);
+  segments.forEach((segment, at) => {
+    latest[segment.demand] = Math.max(latest[segment.demand], days[at]);
+  });
+  return latest;
+}
