@@ -1,0 +1,40 @@
+import { z } from "zod";
+import { emptyAs } from "~/schemas/fields/empty-as";
+import { isoDate } from "~/schemas/fields/iso-date";
+import { optionCodes } from "~/schemas/fields/option-codes";
+import { partNumber } from "~/schemas/fields/part-number";
+import { code, text } from "~/schemas/fields/text";
+import { wholeNumber } from "~/schemas/fields/whole-number";
+import type { ImportKind } from "./import-kind";
+
+const row = z
+  .object({
+    number: code("a kit order number"),
+    kit: partNumber,
+    customer: text(255),
+    serial: emptyAs(code("a serial"), null),
+    wanted_on: emptyAs(isoDate, null),
+    priority: emptyAs(wholeNumber(0, 1_000_000), 100),
+    options: optionCodes,
+    note: text(2_000),
+  })
+  .transform((cells) => ({
+    number: cells.number,
+    kit: cells.kit,
+    customer: cells.customer,
+    serial: cells.serial,
+    wantedOn: cells.wanted_on,
+    priority: cells.priority,
+    options: cells.options,
+    note: cells.note,
+  }));
+
+export type KitOrderRow = z.output<typeof row>;
+
+export const kitOrdersKind: ImportKind<KitOrderRow> = {
+  columns: {
+    required: ["number", "kit"],
+    optional: ["customer", "serial", "wanted_on", "priority", "options", "note"],
+  },
+  row,
+};

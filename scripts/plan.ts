@@ -1,0 +1,59 @@
+import { checkShip } from "~/domain/planning/check-ship";
+import { checkPlanFiles } from "~/services/imports/check-plan-files";
+import { sayCsvProblem } from "~/utils/csv/say-csv-problem";
+import { BadInput } from "./plan/bad-input";
+import { formatTable } from "./plan/format-table";
+import { type PlanArguments, parseArguments, usage } from "./plan/parse-arguments";
+import { readInputFile } from "./plan/read-input-file";
+import { sayDemandProblem } from "./plan/say-demand-problem";
+
+const mostProblems = 20;
+
+async function answerPlan(given: PlanArguments): Promise<string> {
+  const optional = (name: string | null, flag: string) => (name === null ? null : readInputFile(name, flag));
+  const input = checkPlanFiles({
+    parts: await readInputFile(given.parts, "parts"),
+    structure: await readInputFile(given.structure, "structure"),
+    stock: await optional(given.stock, "stock"),
+    supply: await optional(given.supply, "supply"),
+  });
+  if (!input.ok) throw new BadInput(input.problems.map((problem) => sayCsvProblem(problem, problem.file)));
+  const { structure, stock, supply } = input;
+  const { demand, sharing, today } = given;
+  const result = checkShip({ structure, stock, supply, demand, sharing, today });
+  if (!result.ok) throw new BadInput(result.problems.map((each) => sayDemandProblem(each, given.demandText)));
+  return given.format === "table"
+    ? formatTable(result.answer)
+    : `${JSON.stringify(result.answer, null, 2)}\n`;
+}
+
+function write(stream: NodeJS.WriteStream, text: string): Promise<void> {
+  return new Promise((resolve) => stream.write(text, () => resolve()));
+}
+
+function sayBadInput(error: BadInput): string {
+  const { sentences } = error;
+  const more = sentences.length - mostProblems;
+  const shown = more > 0 ? [...sentences.slice(0, mostProblems), `... and ${more} more.`] : sentences;
+  return `${shown.join("\n")}\n`;
+}
+
+/** The command line: 0 with the answer on standard output, 2 with sentences on standard error. Needs no database. */
+export async function runPlan(argv: readonly string[], now = new Date()): Promise<number> {
+  // The reader may have gone (a pipe into head): nothing is left to say to it.
+  process.stdout.on("error", () => {});
+  process.stderr.on("error", () => {});
+  try {
+    const given = parseArguments(argv, now);
+    await write(process.stdout, given === null ? `${usage}\n` : await answerPlan(given));
+    return 0;
+  } catch (error) {
+    if (error instanceof BadInput) {
+      await write(process.stderr, sayBadInput(error));
+      return 2;
+    }
+    const reason = error instanceof Error ? error.message : String(error);
+    await write(process.stderr, `The plan could not be made, through a fault of the program: ${reason}\n`);
+    return 1;
+  }
+}
