@@ -3,6 +3,7 @@ import { projectRoot } from "./project-root.mjs";
 
 /** @type {Set<import("node:child_process").ChildProcess>} */
 const running = new Set();
+let refusing = false;
 
 /**
  * @typedef {object} CommandOptions
@@ -19,6 +20,7 @@ const running = new Set();
  * @returns {Promise<{ code: number, output: string, standardOutput: string }>} code is 127 where the command is not there
  */
 export function runCommand(command, commandArguments, options = {}) {
+  if (refusing) return Promise.resolve({ code: 143, output: "", standardOutput: "" });
   const quiet = options.output === "quiet";
   const child = spawn(command, commandArguments, {
     cwd: options.cwd ?? projectRoot,
@@ -47,8 +49,9 @@ export function runCommand(command, commandArguments, options = {}) {
   });
 }
 
-/** Ends every command that still runs, with its children; those that do not listen are killed after a while. */
+/** Ends every command that still runs, with its children, and lets none begin any more; those that do not listen are killed. */
 export async function endCommands(patience = 3_000) {
+  refusing = true;
   const ended = [...running].map((child) => new Promise((resolve) => child.once("close", resolve)));
   for (const child of running) signalGroup(child, "SIGTERM");
   const timer = setTimeout(() => {

@@ -1,6 +1,7 @@
 import { checkNodeVersion } from "./check-node-version.mjs";
 import { installDebianPackages } from "./debian-packages.mjs";
 import { installNodePackages } from "./node-packages.mjs";
+import { projectRoot } from "./project-root.mjs";
 import { endCommands } from "./run-command.mjs";
 import { sayWhyItStops } from "./stop-sentence.mjs";
 
@@ -15,6 +16,7 @@ export async function withSetUp({ debian, main }) {
   };
   process.on("SIGTERM", stop).on("SIGINT", stop);
   try {
+    process.chdir(projectRoot);
     checkNodeVersion();
     await installDebianPackages(debian);
     await installNodePackages();

@@ -29,7 +29,10 @@ export async function makeDataFolder(folder: DatabaseFolder): Promise<void> {
 }
 
 function setAside(data: string): void {
-  if (readdirSync(data).length === 0) return rmSync(data, { recursive: true });
+  if (readdirSync(data).length === 0) {
+    rmSync(data, { recursive: true });
+    return;
+  }
   const aside = `${data}.broken-${new Date().toISOString().replace(/\D/g, "").slice(0, 14)}`;
   renameSync(data, aside);
   say(`The database folder was not whole; it is kept as ${aside}, and a new one is made`);

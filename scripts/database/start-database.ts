@@ -1,5 +1,5 @@
 import { spawn } from "node:child_process";
-import { closeSync, openSync, readFileSync, rmSync } from "node:fs";
+import { closeSync, openSync, readFileSync, rmSync, writeFileSync } from "node:fs";
 import { setTimeout as sleep } from "node:timers/promises";
 import { findProgram } from "../bootstrap/debian-packages.mjs";
 import { StopSentence } from "../bootstrap/stop-sentence.mjs";
@@ -32,20 +32,24 @@ export async function startDatabase(folderPath: string, options: { durable: bool
     await makeDataFolder(folder);
     rmSync(folder.pidFile, { force: true });
     rmSync(folder.socket, { force: true });
-    return { folder, server: await launch(folder, options.durable), found: false };
+    return { folder, server: await launch(folder, await findFreePort(), options.durable), found: false };
   } finally {
     lock.release();
   }
 }
 
-async function launch(folder: DatabaseFolder, durable: boolean): Promise<RunningServer> {
+/** Starts a server that died again, on the port that its clients know. */
+export function restartDatabase(folder: DatabaseFolder, port: number): Promise<RunningServer> {
+  return launch(folder, port, true);
+}
+
+async function launch(folder: DatabaseFolder, port: number, durable: boolean): Promise<RunningServer> {
   const program = findProgram("mariadbd");
   if (!program)
     throw new StopSentence(
       "The program mariadbd is missing: install the Debian package mariadb-server and start again.",
     );
   const log = openSync(folder.log, "a", 0o600);
-  const port = await findFreePort();
   // A group of its own: Ctrl-C at the terminal reaches the starter, which stops the server last.
   const child = spawn(program, serverArguments(folder, port, durable), {
     detached: true,
@@ -54,6 +58,8 @@ async function launch(folder: DatabaseFolder, durable: boolean): Promise<Running
   closeSync(log);
   child.on("error", () => {});
   child.unref();
+  // The server writes it too, but later: whoever must stop it meanwhile finds it.
+  writeFileSync(folder.pidFile, `${child.pid}\n`);
   const server = await appears(folder, child.pid ?? 0);
   await waitUntilItAnswers(folder, server);
   return server;

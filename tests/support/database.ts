@@ -1,4 +1,4 @@
-import mariadb from "mariadb";
+import mariadb, { type Connection, type ConnectionConfig } from "mariadb";
 import { afterAll, beforeAll, beforeEach, inject } from "vitest";
 import { EXACT_DRIVER } from "~/db/connection-options";
 
@@ -18,7 +18,7 @@ export interface TestDatabase {
  */
 export function useTestDatabase(): TestDatabase {
   const schema = inject("workerSchemas")[Number(process.env.VITEST_POOL_ID)];
-  let connection: mariadb.Connection;
+  let connection: Connection;
   beforeAll(async () => {
     connection = await mariadb.createConnection(connectionConfig(schema.DATABASE_MIGRATE_URL));
     await connection.query("SET SESSION lock_wait_timeout = 10");
@@ -33,7 +33,7 @@ export function useTestDatabase(): TestDatabase {
   };
 }
 
-function connectionConfig(address: string): mariadb.ConnectionConfig {
+function connectionConfig(address: string): ConnectionConfig {
   const url = new URL(address);
   return {
     host: url.hostname,
@@ -49,7 +49,7 @@ function connectionConfig(address: string): mariadb.ConnectionConfig {
 /** The migrations' own record of what ran stays. */
 const isMigrationRecord = (table: string) => /migration|sequelizemeta/i.test(table);
 
-async function tablesWithRows(connection: mariadb.Connection): Promise<string[]> {
+async function tablesWithRows(connection: Connection): Promise<string[]> {
   const names: { name: string }[] = await connection.query(
     "SELECT table_name AS name FROM information_schema.tables WHERE table_schema = DATABASE() AND table_type = 'BASE TABLE'",
   );
@@ -63,7 +63,7 @@ async function tablesWithRows(connection: mariadb.Connection): Promise<string[]>
 }
 
 /** Copies what the migrations put in, once a run: the marker table says that it was done. */
-async function keepBaseline(connection: mariadb.Connection, baseline: string): Promise<void> {
+async function keepBaseline(connection: Connection, baseline: string): Promise<void> {
   const done = await connection.query("SELECT 1 FROM information_schema.tables WHERE table_schema = ?", [
     baseline,
   ]);
@@ -75,7 +75,7 @@ async function keepBaseline(connection: mariadb.Connection, baseline: string): P
 }
 
 /** TRUNCATE, since a DELETE is refused by the tables that may only be added to. */
-async function emptyTables(connection: mariadb.Connection, baseline: string): Promise<void> {
+async function emptyTables(connection: Connection, baseline: string): Promise<void> {
   await connection.query("SET SESSION foreign_key_checks = 0");
   for (const table of await tablesWithRows(connection)) await connection.query(`TRUNCATE TABLE \`${table}\``);
   const kept: { name: string }[] = await connection.query(
