@@ -20,10 +20,10 @@ import { ErrorPage } from "./routes/auth/error-page";
 
 export const middleware = rootMiddleware;
 
-export const loader = publicLoader(({ request }: Route.LoaderArgs, person) => ({
-  person: person && presentPerson(person),
-  theme: readTheme(request.headers.get("Cookie")),
-}));
+export const loader = publicLoader(async ({ request }: Route.LoaderArgs, findPerson) => {
+  const person = await findPerson();
+  return { person: person && presentPerson(person), theme: readTheme(request.headers.get("Cookie")) };
+});
 
 export const meta: Route.MetaFunction = () => [
   { title: "Cotterpin" },

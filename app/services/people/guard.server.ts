@@ -84,13 +84,14 @@ export function guardedAction<A extends ActionFunctionArgs, T>(
   });
 }
 
-/** Wraps the loader of a page that is open to all; the person is null for those who have not signed in. */
-export function publicLoader<A extends LoaderFunctionArgs, T>(
-  run: Run<A, CurrentPerson | null, T>,
-): Guarded<A, T> {
+/** Finds the person if a public page asks; null for those who have not signed in. */
+type FindPerson = () => Promise<CurrentPerson | null>;
+
+/** Wraps the loader of a page that is open to all. */
+export function publicLoader<A extends LoaderFunctionArgs, T>(run: Run<A, FindPerson, T>): Guarded<A, T> {
   return declare("public", async (args) => {
     try {
-      return await run(args, await args.context.get(personContext)());
+      return await run(args, args.context.get(personContext));
     } catch (error) {
       throwForPage(error, args);
     }
@@ -98,13 +99,13 @@ export function publicLoader<A extends LoaderFunctionArgs, T>(
 }
 
 /** Wraps the action of a page that is open to all, such as signing in. */
-export function publicAction<A extends ActionFunctionArgs, T>(
-  run: Run<A, CurrentPerson | null, T>,
-): Guarded<A, T> {
+export function publicAction<A extends ActionFunctionArgs, T>(run: Run<A, FindPerson, T>): Guarded<A, T> {
   return declare("public", async (args) => {
     try {
-      const person = await args.context.get(personContext)();
-      return await run({ ...args, request: limitBody(args.request, FORM_TYPES) }, person);
+      return await run(
+        { ...args, request: limitBody(args.request, FORM_TYPES) },
+        args.context.get(personContext),
+      );
     } catch (error) {
       throwForPage(error, args);
     }

@@ -1,0 +1,29 @@
+import { z } from "zod";
+import { newPasswordSchema } from "./new-password";
+import { roleSchema } from "./role";
+import { emailSchema } from "./sign-in";
+
+export const nameSchema = z
+  .string({ error: "Write a name." })
+  .trim()
+  .min(1, "Write a name.")
+  .max(120, "A name has at most 120 characters.");
+
+export const newPersonSchema = z.object({
+  name: nameSchema,
+  email: emailSchema,
+  password: newPasswordSchema,
+  roles: z.array(roleSchema).min(1, "Give at least one role."),
+});
+
+/** The form that the first visitor of an empty shop fills in. */
+export const setUpSchema = z.object({
+  code: z
+    .string({ error: "Write the code that the start command printed." })
+    .trim()
+    .min(1, "Write the code that the start command printed.")
+    .max(100, "That is not the code that the start command printed."),
+  name: nameSchema,
+  email: emailSchema,
+  password: newPasswordSchema,
+});

@@ -1,0 +1,32 @@
+import { AppError } from "~/utils/errors";
+import { countAttempt, forgiveAttempt } from "./count-attempt.server";
+import { select } from "./run-sql.server";
+import { verifyPassword } from "./verify-password.server";
+
+interface Credentials {
+  /** In small letters. */
+  email: string;
+  password: string;
+  address: string;
+}
+
+/**
+ * The id of the person whose address and password these are. Wrong password, unknown and disabled people get the
+ * same answer after the same time.
+ * @throws AppError `invalid` when they do not go together, `too-many` after too many tries
+ */
+export async function checkCredentials({ email, password, address }: Credentials): Promise<number> {
+  const attempt = await countAttempt({ account: email, address });
+  const [person] = await select<{ id: number; hash: string }>(
+    "SELECT id, password_hash AS hash FROM person WHERE email = :email AND disabled_at IS NULL",
+    { email },
+  );
+  if (!(await verifyPassword(password, person?.hash))) {
+    throw new AppError(
+      "invalid",
+      "This e-mail address and password do not go together. Try again, or ask a manager for a new password.",
+    );
+  }
+  await forgiveAttempt(attempt);
+  return person.id;
+}
