@@ -6,14 +6,14 @@ export const createOrders: Migration = {
   statements: [
     `CREATE TABLE IF NOT EXISTS supplier (
       ${ID},
-      code VARCHAR(60) NOT NULL,
-      supplier_key VARCHAR(60) ${EXACT} NOT NULL,
-      name VARCHAR(190) NOT NULL,
+      code VARCHAR(64) NOT NULL,
+      supplier_key VARCHAR(64) ${EXACT} NOT NULL,
+      name VARCHAR(255) NOT NULL,
       email VARCHAR(190) NOT NULL DEFAULT '',
-      phone VARCHAR(60) NOT NULL DEFAULT '',
+      phone VARCHAR(64) NOT NULL DEFAULT '',
       currency CHAR(3) ${EXACT} NOT NULL,
       lead_time_days INT UNSIGNED NULL,
-      note VARCHAR(1000) NOT NULL DEFAULT '',
+      note VARCHAR(2000) NOT NULL DEFAULT '',
       UNIQUE KEY supplier_supplier_key (supplier_key)
     ) ${TABLE}`,
     `CREATE TABLE IF NOT EXISTS offer (
@@ -41,11 +41,11 @@ export const createOrders: Migration = {
     ) ${TABLE}`,
     `CREATE TABLE IF NOT EXISTS purchase_order (
       ${ID},
-      number VARCHAR(60) ${EXACT} NOT NULL,
+      number VARCHAR(64) ${EXACT} NOT NULL,
       supplier_id BIGINT UNSIGNED NULL,
       state ENUM('draft','sent','closed','cancelled') NOT NULL DEFAULT 'draft',
       ordered_on DATE NULL,
-      note VARCHAR(1000) NOT NULL DEFAULT '',
+      note VARCHAR(2000) NOT NULL DEFAULT '',
       ${CREATED_AT},
       UNIQUE KEY purchase_order_number (number),
       KEY purchase_order_state (state),
@@ -65,12 +65,12 @@ export const createOrders: Migration = {
       KEY purchase_order_line_part (part_id, closed, due_on),
       CONSTRAINT purchase_order_line_order FOREIGN KEY (purchase_order_id) REFERENCES purchase_order (id) ON DELETE CASCADE,
       CONSTRAINT purchase_order_line_part FOREIGN KEY (part_id) REFERENCES part (id),
-      CONSTRAINT purchase_order_line_quantity CHECK (quantity > 0 AND received >= 0),
+      CONSTRAINT purchase_order_line_quantity CHECK (quantity >= 0 AND received >= 0),
       CONSTRAINT purchase_order_line_price CHECK (unit_price >= 0)
     ) ${TABLE}`,
     `CREATE TABLE IF NOT EXISTS shop_order (
       ${ID},
-      number VARCHAR(60) ${EXACT} NOT NULL,
+      number VARCHAR(64) ${EXACT} NOT NULL,
       part_id BIGINT UNSIGNED NOT NULL,
       quantity DECIMAL(20,6) NOT NULL,
       finished DECIMAL(20,6) NOT NULL DEFAULT 0,
@@ -96,14 +96,14 @@ export const createOrders: Migration = {
     ) ${TABLE}`,
     `CREATE TABLE IF NOT EXISTS kit_order (
       ${ID},
-      number VARCHAR(60) ${EXACT} NOT NULL,
+      number VARCHAR(64) ${EXACT} NOT NULL,
       part_id BIGINT UNSIGNED NOT NULL,
-      customer VARCHAR(190) NOT NULL DEFAULT '',
-      serial VARCHAR(60) ${EXACT} NULL,
+      customer VARCHAR(255) NOT NULL DEFAULT '',
+      serial VARCHAR(64) ${EXACT} NULL,
       wanted_on DATE NULL,
       priority INT NOT NULL DEFAULT 0,
       state ENUM('open','shipped','cancelled') NOT NULL DEFAULT 'open',
-      note VARCHAR(1000) NOT NULL DEFAULT '',
+      note VARCHAR(2000) NOT NULL DEFAULT '',
       version INT UNSIGNED NOT NULL DEFAULT 1,
       ${CREATED_AT},
       UNIQUE KEY kit_order_number (number),
@@ -112,7 +112,7 @@ export const createOrders: Migration = {
     ) ${TABLE}`,
     `CREATE TABLE IF NOT EXISTS kit_order_option (
       kit_order_id BIGINT UNSIGNED NOT NULL,
-      option_code VARCHAR(60) ${EXACT} NOT NULL,
+      option_code VARCHAR(64) ${EXACT} NOT NULL,
       PRIMARY KEY (kit_order_id, option_code),
       CONSTRAINT kit_order_option_order FOREIGN KEY (kit_order_id) REFERENCES kit_order (id) ON DELETE CASCADE,
       CONSTRAINT kit_order_option_option FOREIGN KEY (option_code) REFERENCES kit_option (code)

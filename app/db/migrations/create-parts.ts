@@ -38,7 +38,7 @@ export const createParts: Migration = {
     ) ${TABLE}`,
     `CREATE TABLE IF NOT EXISTS kit_option (
       ${ID},
-      code VARCHAR(60) ${EXACT} NOT NULL,
+      code VARCHAR(64) ${EXACT} NOT NULL,
       description VARCHAR(255) NOT NULL DEFAULT '',
       UNIQUE KEY kit_option_code (code)
     ) ${TABLE}`,
@@ -50,9 +50,9 @@ export const createParts: Migration = {
       quantity DECIMAL(20,6) NULL,
       scrap DECIMAL(9,8) NOT NULL DEFAULT 0,
       find_number VARCHAR(40) NULL,
-      option_code VARCHAR(60) ${EXACT} NULL,
-      from_serial VARCHAR(60) ${EXACT} NULL,
-      to_serial VARCHAR(60) ${EXACT} NULL,
+      option_code VARCHAR(64) ${EXACT} NULL,
+      from_serial VARCHAR(64) ${EXACT} NULL,
+      to_serial VARCHAR(64) ${EXACT} NULL,
       from_date DATE NULL,
       to_date DATE NULL,
       KEY structure_line_parent (parent_id, position),
@@ -61,7 +61,7 @@ export const createParts: Migration = {
       CONSTRAINT structure_line_component_part FOREIGN KEY (component_id) REFERENCES part (id),
       CONSTRAINT structure_line_option FOREIGN KEY (option_code) REFERENCES kit_option (code),
       CONSTRAINT structure_line_not_itself CHECK (parent_id <> component_id),
-      CONSTRAINT structure_line_quantity CHECK (quantity > 0),
+      CONSTRAINT structure_line_quantity CHECK (quantity >= 0),
       CONSTRAINT structure_line_scrap CHECK (scrap >= 0 AND scrap < 1)
     ) ${TABLE}`,
   ],

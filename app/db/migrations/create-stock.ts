@@ -8,9 +8,9 @@ export const createStock: Migration = {
   statements: [
     `CREATE TABLE IF NOT EXISTS bin (
       ${ID},
-      code VARCHAR(60) NOT NULL,
-      bin_key VARCHAR(60) ${EXACT} NOT NULL,
-      zone VARCHAR(60) NOT NULL DEFAULT '',
+      code VARCHAR(64) NOT NULL,
+      bin_key VARCHAR(64) ${EXACT} NOT NULL,
+      zone VARCHAR(64) NOT NULL DEFAULT '',
       walk_order INT NOT NULL DEFAULT 0,
       description VARCHAR(255) NOT NULL DEFAULT '',
       UNIQUE KEY bin_bin_key (bin_key),

@@ -5,7 +5,7 @@ export const createSystem: Migration = {
   name: "0002-create-system",
   statements: [
     `CREATE TABLE IF NOT EXISTS setting (
-      name VARCHAR(60) ${ASCII} NOT NULL PRIMARY KEY,
+      name VARCHAR(64) ${ASCII} NOT NULL PRIMARY KEY,
       value JSON NOT NULL,
       changed_at DATETIME(3) NOT NULL DEFAULT CURRENT_TIMESTAMP(3) ON UPDATE CURRENT_TIMESTAMP(3)
     ) ${TABLE}`,
@@ -31,7 +31,7 @@ export const createSystem: Migration = {
       ${ID},
       at DATETIME(3) NOT NULL DEFAULT CURRENT_TIMESTAMP(3),
       actor_id BIGINT UNSIGNED NULL,
-      act VARCHAR(60) ${ASCII} NOT NULL,
+      act VARCHAR(64) ${ASCII} NOT NULL,
       subject VARCHAR(200) ${EXACT} NOT NULL,
       \`before\` JSON NULL,
       \`after\` JSON NULL,

@@ -13,7 +13,7 @@ export class KitOrderOption extends Model<
 KitOrderOption.init(
   {
     kitOrderId: { type: DataTypes.BIGINT.UNSIGNED, primaryKey: true, allowNull: false },
-    optionCode: { type: DataTypes.STRING(60), primaryKey: true, allowNull: false },
+    optionCode: { type: DataTypes.STRING(64), primaryKey: true, allowNull: false },
   },
   { sequelize, tableName: "kit_order_option" },
 );

@@ -25,14 +25,14 @@ export class KitOrder extends Model<InferAttributes<KitOrder>, InferCreationAttr
 KitOrder.init(
   {
     id: { type: DataTypes.BIGINT.UNSIGNED, primaryKey: true, autoIncrement: true },
-    number: { type: DataTypes.STRING(60), allowNull: false },
+    number: { type: DataTypes.STRING(64), allowNull: false },
     partId: { type: DataTypes.BIGINT.UNSIGNED, allowNull: false },
-    customer: DataTypes.STRING(190),
-    serial: DataTypes.STRING(60),
+    customer: DataTypes.STRING(255),
+    serial: DataTypes.STRING(64),
     wantedOn: DataTypes.DATEONLY,
     priority: DataTypes.INTEGER,
     state: DataTypes.ENUM("open", "shipped", "cancelled"),
-    note: DataTypes.STRING(1000),
+    note: DataTypes.STRING(2000),
     version: DataTypes.INTEGER,
     createdAt: DataTypes.DATE(3),
   },

@@ -24,11 +24,11 @@ export class PurchaseOrder extends Model<
 PurchaseOrder.init(
   {
     id: { type: DataTypes.BIGINT.UNSIGNED, primaryKey: true, autoIncrement: true },
-    number: { type: DataTypes.STRING(60), allowNull: false },
+    number: { type: DataTypes.STRING(64), allowNull: false },
     supplierId: DataTypes.BIGINT.UNSIGNED,
     state: DataTypes.ENUM("draft", "sent", "closed", "cancelled"),
     orderedOn: DataTypes.DATEONLY,
-    note: DataTypes.STRING(1000),
+    note: DataTypes.STRING(2000),
     createdAt: DataTypes.DATE(3),
   },
   { sequelize, tableName: "purchase_order" },

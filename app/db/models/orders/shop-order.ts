@@ -22,7 +22,7 @@ export class ShopOrder extends Model<InferAttributes<ShopOrder>, InferCreationAt
 ShopOrder.init(
   {
     id: { type: DataTypes.BIGINT.UNSIGNED, primaryKey: true, autoIncrement: true },
-    number: { type: DataTypes.STRING(60), allowNull: false },
+    number: { type: DataTypes.STRING(64), allowNull: false },
     partId: { type: DataTypes.BIGINT.UNSIGNED, allowNull: false },
     quantity: { type: DataTypes.DECIMAL(20, 6), allowNull: false },
     finished: DataTypes.DECIMAL(20, 6),

@@ -23,14 +23,14 @@ export class Supplier extends Model<InferAttributes<Supplier>, InferCreationAttr
 Supplier.init(
   {
     id: { type: DataTypes.BIGINT.UNSIGNED, primaryKey: true, autoIncrement: true },
-    code: { type: DataTypes.STRING(60), allowNull: false },
-    supplierKey: { type: DataTypes.STRING(60), allowNull: false },
-    name: { type: DataTypes.STRING(190), allowNull: false },
+    code: { type: DataTypes.STRING(64), allowNull: false },
+    supplierKey: { type: DataTypes.STRING(64), allowNull: false },
+    name: { type: DataTypes.STRING(255), allowNull: false },
     email: DataTypes.STRING(190),
-    phone: DataTypes.STRING(60),
+    phone: DataTypes.STRING(64),
     currency: { type: DataTypes.STRING(3), allowNull: false },
     leadTimeDays: DataTypes.INTEGER,
-    note: DataTypes.STRING(1000),
+    note: DataTypes.STRING(2000),
   },
   { sequelize, tableName: "supplier" },
 );

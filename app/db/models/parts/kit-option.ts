@@ -17,7 +17,7 @@ export class KitOption extends Model<InferAttributes<KitOption>, InferCreationAt
 KitOption.init(
   {
     id: { type: DataTypes.BIGINT.UNSIGNED, primaryKey: true, autoIncrement: true },
-    code: { type: DataTypes.STRING(60), allowNull: false },
+    code: { type: DataTypes.STRING(64), allowNull: false },
     description: DataTypes.STRING(255),
   },
   { sequelize, tableName: "kit_option" },

@@ -20,9 +20,9 @@ export class Bin extends Model<InferAttributes<Bin>, InferCreationAttributes<Bin
 Bin.init(
   {
     id: { type: DataTypes.BIGINT.UNSIGNED, primaryKey: true, autoIncrement: true },
-    code: { type: DataTypes.STRING(60), allowNull: false },
-    binKey: { type: DataTypes.STRING(60), allowNull: false },
-    zone: DataTypes.STRING(60),
+    code: { type: DataTypes.STRING(64), allowNull: false },
+    binKey: { type: DataTypes.STRING(64), allowNull: false },
+    zone: DataTypes.STRING(64),
     walkOrder: DataTypes.INTEGER,
     description: DataTypes.STRING(255),
   },

@@ -23,7 +23,7 @@ AuditEvent.init(
     id: { type: DataTypes.BIGINT.UNSIGNED, primaryKey: true, autoIncrement: true },
     at: DataTypes.DATE(3),
     actorId: DataTypes.BIGINT.UNSIGNED,
-    act: { type: DataTypes.STRING(60), allowNull: false },
+    act: { type: DataTypes.STRING(64), allowNull: false },
     subject: { type: DataTypes.STRING(200), allowNull: false },
     before: DataTypes.JSON,
     after: DataTypes.JSON,

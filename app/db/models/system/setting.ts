@@ -16,7 +16,7 @@ export class Setting extends Model<InferAttributes<Setting>, InferCreationAttrib
 
 Setting.init(
   {
-    name: { type: DataTypes.STRING(60), primaryKey: true, allowNull: false },
+    name: { type: DataTypes.STRING(64), primaryKey: true, allowNull: false },
     value: { type: DataTypes.JSON, allowNull: false },
     changedAt: DataTypes.DATE(3),
   },
