@@ -12,6 +12,13 @@ export default [
   // pack
 
   // api
+  route("api/ship-check", "routes/api/ship-check.ts"),
+  route("api/ship-line", "routes/api/ship-line.ts"),
+  route("api/check-answer", "routes/api/check-answer.ts"),
+  route("api/parts", "routes/api/parts.ts"),
+  route("api/parts/:partNumber", "routes/api/part.ts"),
+  route("api/structure/:partNumber", "routes/api/structure.ts"),
+  route("api/where-used/:partNumber", "routes/api/where-used.ts"),
   route("api/health", "routes/api/health.ts"),
 
   route("*", "routes/not-found.tsx"),

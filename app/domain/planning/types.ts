@@ -132,8 +132,8 @@ export interface Rung {
   partNumber: string;
   /** Kits so far, this one included, in the order of service. */
   kits: number;
-  /** Two decimals. */
-  cost: DecimalString;
+  /** Two decimals; null for people who may not see costs. */
+  cost: DecimalString | null;
   readyOn: IsoDate;
   stoppers: { partNumber: string; missing: DecimalString }[];
 }

@@ -1,0 +1,134 @@
+import { presentShipCheck } from "~/domain/planning/answer/present-ship-check";
+import { sumCost } from "~/domain/planning/answer/sum-cost";
+import { countReached } from "~/domain/planning/count-reached";
+import { offeredOptions } from "~/domain/planning/netting/split-demand";
+import { partKey } from "~/domain/planning/part-key";
+import type { ShipPlan } from "~/domain/planning/plan-ship";
+import type { ShipCheck } from "~/domain/planning/types";
+import type { CheckKit, CheckPageAnswer, CheckPart, CheckQuestion } from "~/schemas/planning/check-answer";
+import type { CurrentPerson } from "~/services/people/current-person";
+import { mayDo } from "~/services/people/permissions";
+import { AppError } from "~/utils/errors";
+import type { PlanBook } from "./get-plan-book.server";
+import { getPlanBook } from "./get-plan-book.server";
+import { hideCosts } from "./hide-costs";
+import { planDemand } from "./plan-demand.server";
+
+interface Asked {
+  kit?: string;
+  quantity: number;
+  by?: string;
+  options: string[];
+}
+
+/** Everything the page Check shows for a question; without a kit, the first kit of the book is asked for. */
+export async function getCheckAnswer(asked: Asked, person: CurrentPerson): Promise<CheckPageAnswer> {
+  const book = await getPlanBook();
+  const kits = presentKits(book);
+  const seesCosts = mayDo(person.roles, "see-costs");
+  const kit = asked.kit ?? mostWanted(book, kits);
+  const question: CheckQuestion = {
+    kit:
+      kit === null ? null : (book.parts[book.structure.numberOf.get(partKey(kit)) ?? -1]?.partNumber ?? kit),
+    quantity: asked.quantity,
+    by: asked.by ?? null,
+    options: asked.options,
+  };
+  const empty = {
+    question,
+    answer: null,
+    problem: null,
+    parts: [],
+    kits,
+    stoppers: [],
+    totalParts: 0,
+    seesCosts,
+  };
+  if (question.kit === null) return empty;
+  const planned = tryPlan(book, question);
+  if (typeof planned === "string") return { ...empty, problem: planned };
+  const answer = presentShipCheck(planned);
+  const parts = presentParts(book, planned, answer, seesCosts);
+  return {
+    ...empty,
+    answer: seesCosts ? answer : hideCosts(answer),
+    parts,
+    stoppers: worstFirst(planned, answer),
+    totalParts: countReached(book.structure, planned.segments[0].part),
+  };
+}
+
+/** The kit that most open orders ask for, else the first one there is. */
+function mostWanted(book: PlanBook, kits: CheckKit[]): string | null {
+  const counts = new Map<string, number>();
+  for (const { partNumber } of book.kitOrders) counts.set(partNumber, (counts.get(partNumber) ?? 0) + 1);
+  const [first] = [...kits].sort((a, b) => (counts.get(b.partNumber) ?? 0) - (counts.get(a.partNumber) ?? 0));
+  return first?.partNumber ?? null;
+}
+
+function tryPlan(book: PlanBook, question: CheckQuestion): ShipPlan | string {
+  const { kit, quantity, by, options } = question;
+  const demand = { partNumber: kit ?? "", quantity: String(quantity), due: by, options, serial: null };
+  try {
+    return planDemand(book, [demand], "strict");
+  } catch (error) {
+    if (error instanceof AppError) return error.message;
+    throw error;
+  }
+}
+
+function presentKits({ parts, structure, options }: PlanBook): CheckKit[] {
+  return parts
+    .flatMap((part, number) => (part.sold ? [{ part, number }] : []))
+    .map(({ part, number }) => ({
+      partNumber: part.partNumber,
+      description: part.description,
+      options: offeredOptions(structure, number).map((code) => ({
+        code,
+        description: options.get(code) ?? "",
+      })),
+    }))
+    .sort((a, b) => (a.partNumber < b.partNumber ? -1 : 1));
+}
+
+/** The parts that the answer names. */
+function presentParts(book: PlanBook, plan: ShipPlan, answer: ShipCheck, seesCosts: boolean): CheckPart[] {
+  const named = new Set<string>();
+  for (const { partNumber } of answer.shortages) named.add(partNumber);
+  for (const { partNumber } of answer.criticalChain) named.add(partNumber);
+  for (const { partNumber } of answer.warnings) named.add(partNumber);
+  for (const { partNumber } of answer.demand) named.add(partNumber);
+  return [...named].map((partNumber) => {
+    const number = book.structure.numberOf.get(partKey(partNumber)) as number;
+    const part = book.parts[number];
+    return {
+      partNumber,
+      description: part.description,
+      sourcing: part.sourcing,
+      unit: part.unit,
+      decimals: part.decimals,
+      supplier: part.offered,
+      leadTimeDays: part.leadTimeDays,
+      unitCost: seesCosts ? part.unitCost : null,
+      cost: seesCosts && part.unitCost !== null ? costOf(plan, number) : null,
+    };
+  });
+}
+
+function costOf(plan: ShipPlan, part: number): string {
+  return sumCost(plan.structure, [{ part, short: plan.served.coming.net[part] }]);
+}
+
+/** Latest day first, then the dearest, then by part number (PLANNING.md, section 4). */
+function worstFirst(plan: ShipPlan, answer: ShipCheck): string[] {
+  const rows = answer.shortages.map(({ partNumber, readyOn }) => {
+    const number = plan.structure.numberOf.get(partKey(partNumber)) as number;
+    return { partNumber, readyOn, cents: BigInt(costOf(plan, number).replace(".", "")) };
+  });
+  rows.sort((a, b) => {
+    if (a.readyOn !== b.readyOn) return a.readyOn < b.readyOn ? 1 : -1;
+    if (a.cents !== b.cents) return a.cents < b.cents ? 1 : -1;
+    return a.partNumber < b.partNumber ? -1 : 1;
+  });
+  return rows.map(({ partNumber }) => partNumber);
+}

@@ -1,0 +1,62 @@
+import { presentShipCheck } from "~/domain/planning/answer/present-ship-check";
+import type { PlanDemand, ShipCheck } from "~/domain/planning/types";
+import type { ShipLineAnswer } from "~/schemas/planning/ship-line";
+import type { PlanBook } from "./get-plan-book.server";
+import { getPlanBook } from "./get-plan-book.server";
+import type { OpenKitOrder } from "./load-kit-orders.server";
+import { planDemand } from "./plan-demand.server";
+import { readRows } from "./read-rows.server";
+
+const KITS_SHOWN = 10;
+
+/** The next open kit orders in priority order, one kit each: how many are ready, and what stops the first that is not. */
+export async function getShipLine(): Promise<ShipLineAnswer> {
+  const book = await getPlanBook();
+  const orders = book.kitOrders.slice(0, await kitsShown());
+  if (orders.length === 0) return { ready: 0, of: 0, next: null, allBy: null, revision: book.revision };
+  const answer = presentShipCheck(
+    planDemand(
+      book,
+      orders.map((order) => demandOf(order, book)),
+      "strict",
+    ),
+  );
+  const waiting = answer.demand.findIndex((one) => one.buildable === 0);
+  return {
+    ready: answer.demand.filter((one) => one.buildable !== 0).length,
+    of: orders.length,
+    next: waiting < 0 ? null : nextToWait(orders, answer, waiting),
+    allBy: answer.ladder[answer.ladder.length - 1].readyOn,
+    revision: book.revision,
+  };
+}
+
+/** A wanted date that has passed asks for the kit today. */
+function demandOf(order: OpenKitOrder, book: PlanBook): PlanDemand {
+  const { partNumber, options, serial, wantedOn } = order;
+  const due = wantedOn !== null && wantedOn >= book.day ? wantedOn : null;
+  return { partNumber, quantity: "1", due, options, serial };
+}
+
+/** The orders before the first that waits lack nothing, so all that its rung lacks is its own. */
+function nextToWait(orders: OpenKitOrder[], answer: ShipCheck, waiting: number): ShipLineAnswer["next"] {
+  const { number, partNumber } = orders[waiting];
+  return { kitOrder: number, partNumber, stoppers: worstFirst(answer, answer.ladder[waiting].stoppers) };
+}
+
+function worstFirst<Stopper extends { partNumber: string }>(
+  answer: ShipCheck,
+  stoppers: Stopper[],
+): Stopper[] {
+  const readyOn = new Map(answer.shortages.map((shortage) => [shortage.partNumber, shortage.readyOn]));
+  const day = (stopper: Stopper) => readyOn.get(stopper.partNumber) ?? "";
+  return [...stoppers].sort((a, b) => (day(a) < day(b) ? 1 : day(a) > day(b) ? -1 : 0));
+}
+
+async function kitsShown(): Promise<number> {
+  const [setting] = await readRows<{ value: unknown }>(
+    "SELECT value FROM setting WHERE name = 'ship-line-kits'",
+  );
+  const count = Number(setting?.value ?? KITS_SHOWN);
+  return Number.isInteger(count) && count > 0 ? count : KITS_SHOWN;
+}

@@ -1,0 +1,72 @@
+import type { Transaction } from "sequelize";
+import type { Supplies } from "~/domain/planning/compile-supplies";
+import { compileSupplies } from "~/domain/planning/compile-supplies";
+import { splitPromised } from "~/domain/planning/split-promised";
+import type { Structure } from "~/domain/planning/structure/structure";
+import type { IsoDate, PlanStock, PlanSupply } from "~/domain/planning/types";
+import { trimDecimal } from "~/utils/format/trim-decimal";
+import { readRows } from "./read-rows.server";
+
+/** Usable stock by lot; what is held, staged or with a supplier is out of reach. */
+const STOCK = `
+  SELECT part.part_number AS partNumber, SUM(balance.quantity) AS quantity, lot.expires_on AS expiresOn
+  FROM balance
+  JOIN part ON part.id = balance.part_id
+  JOIN lot ON lot.id = balance.lot_id
+  WHERE balance.state = 'usable'
+  GROUP BY part.id, lot.expires_on
+  HAVING SUM(balance.quantity) > 0`;
+
+/** Components of unfinished builds: promised ones still lie in their bins, picked ones do not. */
+const IN_WORK = `
+  SELECT part.part_number AS partNumber, SUM(component.promised) AS promised, SUM(component.picked) AS picked
+  FROM shop_order_component component
+  JOIN shop_order ON shop_order.id = component.shop_order_id
+  JOIN part ON part.id = component.part_id
+  WHERE shop_order.state IN ('planned', 'released')
+  GROUP BY part.id`;
+
+const ORDERS = `
+  SELECT part.part_number AS partNumber, line.quantity - line.received AS quantity, line.due_on AS due,
+    purchase_order.number AS reference
+  FROM purchase_order_line line
+  JOIN purchase_order ON purchase_order.id = line.purchase_order_id
+  JOIN part ON part.id = line.part_id
+  WHERE purchase_order.state = 'sent' AND line.closed = FALSE AND line.quantity > line.received
+  UNION ALL
+  SELECT part.part_number, shop_order.quantity - shop_order.finished, shop_order.due_on, shop_order.number
+  FROM shop_order
+  JOIN part ON part.id = shop_order.part_id
+  WHERE shop_order.state = 'released' AND shop_order.quantity > shop_order.finished`;
+
+interface InWork {
+  partNumber: string;
+  promised: string;
+  picked: string;
+}
+
+/** Reads stock and open orders and lays them out for planning on the given day. */
+export async function loadSupplies(
+  structure: Structure,
+  day: IsoDate,
+  transaction: Transaction,
+): Promise<Supplies> {
+  const stock = (await readRows<PlanStock>(STOCK, {}, transaction)).map(trimQuantity);
+  const inWork = await readRows<InWork>(IN_WORK, {}, transaction);
+  const orders = (await readRows<PlanSupply>(ORDERS, {}, transaction)).map(trimQuantity);
+  const promised = inWork.map(({ partNumber, promised }) => ({
+    partNumber,
+    quantity: trimDecimal(promised),
+  }));
+  const picked = inWork.map(({ partNumber, picked }) => ({
+    partNumber,
+    quantity: trimDecimal(picked),
+    expiresOn: null,
+    nowOnly: true,
+  }));
+  return compileSupplies(structure, [...splitPromised(stock, promised), ...picked], orders, day);
+}
+
+function trimQuantity<Row extends { quantity: string }>(row: Row): Row {
+  return { ...row, quantity: trimDecimal(row.quantity) };
+}
