@@ -1,18 +1,13 @@
-import { checkNodeVersion } from "./bootstrap/check-node-version.mjs";
-import { installNodePackages } from "./bootstrap/node-packages.mjs";
-import { sayWhyItStops } from "./bootstrap/stop-sentence.mjs";
+import { existsSync } from "node:fs";
+import { projectRoot } from "./bootstrap/project-root.mjs";
 
-// Standard output belongs to the answer; progress of a first installation goes beside it.
-console.log = console.error;
-
-try {
-  checkNodeVersion();
-  await installNodePackages();
+if (existsSync(`${projectRoot}/node_modules/tsx`)) {
   const { register } = await import("tsx/esm/api");
-  register();
+  register({ tsconfig: `${projectRoot}/tsconfig.json` });
   const { runPlan } = await import("./plan.ts");
-  process.exitCode = await runPlan(process.argv.slice(2));
-} catch (error) {
-  sayWhyItStops(error);
+  const { stdout, stderr } = process;
+  process.exitCode = await runPlan(process.argv.slice(2), { stdout, stderr, now: new Date() });
+} else {
+  console.error("The node packages are missing: run npm ci or npm start first.");
   process.exitCode = 1;
 }

@@ -18,7 +18,7 @@ interface Preparation {
 export async function prepareSchema({ addresses, local, demo, empty }: Preparation): Promise<void> {
   const seeding = path.join(local, "seeding");
   if (empty && existsSync(seeding)) {
-    say("The demo firm was only half there; it is made anew");
+    say("The demo firm was only half there; it is cleared away");
     await empty();
   }
   await run("scripts/migrate.ts", "Preparing the database", addresses);
