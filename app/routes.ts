@@ -8,8 +8,14 @@ export default [
   route("set-up", "routes/auth/set-up.tsx"),
 
   // check
+  route("check", "routes/check/check.tsx"),
 
   // pack
+  route("pack", "routes/pack/pack.ts"),
+  route("pack/kit-orders", "routes/pack/kit-orders.tsx"),
+  route("pack/kit-orders/new", "routes/pack/new-kit-order.tsx"),
+  route("pack/kit-orders/:number", "routes/pack/edit-kit-order.tsx"),
+  route("pack/kit-orders/:number/cancel", "routes/pack/cancel-kit-order.tsx"),
 
   // api
   route("api/ship-check", "routes/api/ship-check.ts"),

@@ -69,7 +69,7 @@ function amount(missing: string, part: CheckPageAnswer["parts"][number] | undefi
 function allBy(page: CheckPageAnswer, last: Rung, asked: number, said: boolean): Word[] {
   const due = page.answer?.demand[0]?.due ?? null;
   const when = said ? "" : ` ${sentenceCase(all(asked))} by ${onDay(last.readyOn, page)}`;
-  return [{ text: `${said ? "" : "."}${when}${againstDue(last.readyOn, due, page)}${price(page, last)}.` }];
+  return [{ text: `${said ? "" : "."}${when}${againstDue(last.readyOn, due, page)}${price(last)}.` }];
 }
 
 function againstDue(readyOn: string, due: string | null, page: CheckPageAnswer): string {
@@ -79,8 +79,8 @@ function againstDue(readyOn: string, due: string | null, page: CheckPageAnswer):
   return `, ${cardinal(late)} ${late === 1 ? "day" : "days"} late for ${onDay(due, page)}`;
 }
 
-function price(page: CheckPageAnswer, rung: Rung): string {
-  if (!page.seesCosts) return "";
+function price(rung: Rung): string {
+  if (rung.cost === null) return "";
   if (/^0+(\.0+)?$/.test(rung.cost)) return ", with no more parts to buy";
   return `, for ${formatMoney(rung.cost)} more in parts`;
 }

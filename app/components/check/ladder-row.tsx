@@ -48,7 +48,7 @@ function Stopped({ row, page }: { row: Row; page: CheckPageAnswer }) {
         <strong className="figure font-semibold">
           {formatDate(row.readyOn, { today: page.answer?.today, short: true })}
         </strong>
-        {page.seesCosts && (
+        {row.cost !== null && (
           <>
             {" "}
             <span className="ml-2 text-soft">

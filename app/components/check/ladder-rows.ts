@@ -10,7 +10,7 @@ export interface LadderRow {
   to: number;
   ready: boolean;
   /** Of kit `to`. */
-  cost: string;
+  cost: string | null;
   readyOn: string;
   /** Parts that stop no kit below this row. */
   fresh: Stopper[];
