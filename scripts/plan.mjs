@@ -1,13 +1,19 @@
-import { existsSync } from "node:fs";
-import { projectRoot } from "./bootstrap/project-root.mjs";
+import { checkNodeVersion } from "./bootstrap/check-node-version.mjs";
+import { installNodePackages } from "./bootstrap/node-packages.mjs";
+import { sayWhyItStops } from "./bootstrap/stop-sentence.mjs";
 
-if (existsSync(`${projectRoot}/node_modules/tsx`)) {
+// Standard output belongs to the answer; progress of a first installation goes beside it.
+console.log = console.error;
+
+try {
+  checkNodeVersion();
+  await installNodePackages();
   const { register } = await import("tsx/esm/api");
-  register({ tsconfig: `${projectRoot}/tsconfig.json` });
-  const { runPlan } = await import("./plan.ts");
+  register();
+  const { runPlan } = await import("./plan/run-plan.ts");
   const { stdout, stderr } = process;
   process.exitCode = await runPlan(process.argv.slice(2), { stdout, stderr, now: new Date() });
-} else {
-  console.error("The node packages are missing: run npm ci or npm start first.");
+} catch (error) {
+  sayWhyItStops(error);
   process.exitCode = 1;
 }
