@@ -172,5 +172,6 @@ export interface Causes {
   partNumber: string;
   gross: DecimalString;
   parents: { partNumber: string; quantity: DecimalString }[];
-  demands: { demand: number; quantity: DecimalString }[];
+  /** Asked for directly, by a demand on the part itself. */
+  asked: DecimalString;
 }
