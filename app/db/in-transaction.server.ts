@@ -44,8 +44,13 @@ async function tryOnce<Result>(work: (transaction: Transaction) => Promise<Resul
     return result;
   } catch (error) {
     await rollBack(transaction);
-    throw failureOf(transaction) ?? error;
+    throw causeOf(error, failureOf(transaction));
   }
+}
+
+/** A failed statement that another try may cure counts, even where something else came of it; an answer stays one. */
+function causeOf(error: unknown, failure: unknown): unknown {
+  return isTransient(failure) && !(error instanceof AppError) ? failure : error;
 }
 
 async function rollBack(transaction: Transaction): Promise<void> {
