@@ -38,6 +38,10 @@ export function Layout({ children }: { children: ReactNode }) {
       <head>
         <meta charSet="utf-8" />
         <meta name="viewport" content="width=device-width, initial-scale=1" />
+        <meta name="color-scheme" content="light dark" />
+        <link rel="icon" href="/favicon.svg" type="image/svg+xml" />
+        <link rel="apple-touch-icon" href="/icons/icon-180.png" />
+        <link rel="manifest" href="/manifest.webmanifest" />
         <Meta />
         <Links nonce={nonce} />
       </head>

@@ -1,5 +1,5 @@
 import type { Transaction } from "sequelize";
-import { AuditEvent } from "~/db/models/system/audit-event";
+import { insert } from "~/services/people/run-sql.server";
 import { raiseRevision } from "~/services/revision/raise-revision.server";
 
 interface Recorded {
@@ -11,15 +11,15 @@ interface Recorded {
 
 /** Writes what was done to an order into the audit and raises the revision of the orders. */
 export async function recordKitOrder(event: Recorded, transaction: Transaction): Promise<void> {
-  await AuditEvent.create(
+  await insert(
+    "INSERT INTO audit_event (actor_id, act, subject, `before`, `after`) VALUES (:actorId, 'kit-orders', :subject, :before, :after)",
     {
       actorId: event.actorId,
-      act: "kit-orders",
       subject: `kit order ${event.number}`,
-      before: event.before ?? null,
-      after: event.after,
+      before: event.before === undefined ? null : JSON.stringify(event.before),
+      after: JSON.stringify(event.after),
     },
-    { transaction },
+    transaction,
   );
   await raiseRevision("orders", transaction);
 }
