@@ -54,7 +54,7 @@ export function ErrorPage({ status, problem }: ErrorPageProps) {
   const requestId = textOf(problem, "requestId");
   return (
     <section className="mx-auto w-full max-w-2xl px-4 py-12 sm:py-20">
-      <CotterPin seated={false} className="h-12 w-7 text-soft" />
+      <CotterPin seated={false} className="h-12 w-7 overflow-visible text-soft" />
       <h1 className="mt-6 text-3xl leading-tight font-bold sm:text-4xl">{words.heading}</h1>
       <p className="mt-4 text-lg">{detail ?? words.detail}</p>
       <p className="mt-2 text-soft">{words.next}</p>

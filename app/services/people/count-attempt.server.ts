@@ -1,5 +1,5 @@
 import { AppError } from "~/utils/errors";
-import { run, select } from "./run-sql.server";
+import { insert, run, select } from "./run-sql.server";
 import { hashSecret } from "./secret.server";
 
 const MINUTES = 15;
@@ -21,7 +21,7 @@ interface Try {
  */
 export async function countAttempt({ account, address }: Try): Promise<number> {
   const accountKey = hashSecret(account);
-  const { insertId } = await run(
+  const attempt = await insert(
     "INSERT INTO sign_in_attempt (account_key, address, succeeded) VALUES (:accountKey, :address, FALSE)",
     { accountKey, address },
   );
@@ -40,8 +40,8 @@ export async function countAttempt({ account, address }: Try): Promise<number> {
     { accountKey, address },
   );
   const accountFull = Number(row.ofAccount) > MOST_FOR_ACCOUNT;
-  if (!accountFull && Number(row.fromAddress) <= MOST_FROM_ADDRESS) return insertId;
-  await run("DELETE FROM sign_in_attempt WHERE id = :id", { id: insertId });
+  if (!accountFull && Number(row.fromAddress) <= MOST_FROM_ADDRESS) return attempt;
+  await run("DELETE FROM sign_in_attempt WHERE id = :id", { id: attempt });
   const seconds = Math.max(1, Number(accountFull ? row.waitAccount : row.waitAddress) + 1);
   const minutes = Math.ceil(seconds / 60);
   throw new AppError(

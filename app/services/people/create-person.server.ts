@@ -5,7 +5,7 @@ import type { Role } from "~/schemas/people/role";
 import { AppError } from "~/utils/errors";
 import { parseInput } from "~/utils/request-body";
 import { hashPassword } from "./hash-password.server";
-import { run } from "./run-sql.server";
+import { insert } from "./run-sql.server";
 
 interface NewPerson {
   name: string;
@@ -31,7 +31,7 @@ export async function createPerson(input: NewPerson, options: Options = {}): Pro
   const passwordHash = await hashPassword(person.password);
   try {
     return await inTransaction(
-      (transaction) => insert(person, passwordHash, options.actorId ?? null, transaction),
+      (transaction) => insertPerson(person, passwordHash, options.actorId ?? null, transaction),
       {
         transaction: options.transaction,
       },
@@ -43,7 +43,7 @@ export async function createPerson(input: NewPerson, options: Options = {}): Pro
   }
 }
 
-async function insert(
+async function insertPerson(
   person: NewPerson,
   passwordHash: string,
   actorId: number | null,
@@ -51,15 +51,15 @@ async function insert(
 ) {
   const { name, email } = person;
   const roles = [...new Set(person.roles)];
-  const { insertId: id } = await run(
+  const id = await insert(
     "INSERT INTO person (name, email, password_hash) VALUES (:name, :email, :passwordHash)",
     { name, email, passwordHash },
     transaction,
   );
   for (const role of roles) {
-    await run("INSERT INTO person_role (person_id, role) VALUES (:id, :role)", { id, role }, transaction);
+    await insert("INSERT INTO person_role (person_id, role) VALUES (:id, :role)", { id, role }, transaction);
   }
-  await run(
+  await insert(
     "INSERT INTO audit_event (actor_id, act, subject, `after`) VALUES (:actorId, 'people', :subject, :after)",
     { actorId, subject: `person ${id}`, after: JSON.stringify({ name, email, roles }) },
     transaction,

@@ -1,5 +1,5 @@
 import type { Role } from "~/schemas/people/role";
-import { run } from "./run-sql.server";
+import { insert } from "./run-sql.server";
 import { hashSecret, newSecret } from "./secret.server";
 
 /**
@@ -8,7 +8,7 @@ import { hashSecret, newSecret } from "./secret.server";
  */
 export async function createToken({ role, name }: { role: Role; name: string }): Promise<string> {
   const token = newSecret();
-  await run("INSERT INTO api_token (token_hash, role, name) VALUES (:hash, :role, :name)", {
+  await insert("INSERT INTO api_token (token_hash, role, name) VALUES (:hash, :role, :name)", {
     hash: hashSecret(token),
     role,
     name,

@@ -2,7 +2,7 @@ import { randomInt } from "node:crypto";
 import { inTransaction } from "~/db/in-transaction.server";
 import { hasManager } from "./has-manager.server";
 import { hashSetupCode } from "./hash-setup-code.server";
-import { run } from "./run-sql.server";
+import { insert, run } from "./run-sql.server";
 
 /** Without letters and digits that look alike. */
 const ALPHABET = "ABCDEFGHJKMNPQRSTUVWXYZ23456789";
@@ -17,7 +17,7 @@ export async function makeSetupCode(): Promise<string | null> {
     const letters = Array.from({ length: 16 }, () => ALPHABET[randomInt(ALPHABET.length)]).join("");
     const code = (letters.match(/.{4}/g) ?? []).join("-");
     await run("DELETE FROM setup_code WHERE used_at IS NULL", {}, transaction);
-    await run(
+    await insert(
       "INSERT INTO setup_code (code_hash, expires_at) VALUES (:hash, NOW(3) + INTERVAL 7 DAY)",
       { hash: hashSetupCode(code) },
       transaction,

@@ -12,12 +12,14 @@ export function select<Row extends object>(
   return sequelize.query<Row>(sql, { replacements: values, type: QueryTypes.SELECT, transaction });
 }
 
-/** Runs one statement that changes rows. @returns the new row's id, if one was added, and how many rows changed */
-export async function run(
-  sql: string,
-  values: Values = {},
-  transaction?: Transaction,
-): Promise<{ insertId: number; affectedRows: number }> {
+/** Adds one row by an `INSERT INTO`. @returns the row's id, where the table gives ids */
+export async function insert(sql: string, values: Values = {}, transaction?: Transaction): Promise<number> {
+  const [id] = await sequelize.query(sql, { replacements: values, type: QueryTypes.INSERT, transaction });
+  return Number(id);
+}
+
+/** Runs one statement that changes or deletes rows. @returns how many */
+export async function run(sql: string, values: Values = {}, transaction?: Transaction): Promise<number> {
   const [result] = await sequelize.query(sql, { replacements: values, transaction });
-  return result as unknown as { insertId: number; affectedRows: number };
+  return (result as unknown as { affectedRows: number }).affectedRows;
 }

@@ -25,7 +25,7 @@ export async function setUpManager(input: unknown, address: string): Promise<num
       { hash: hashSetupCode(code) },
       transaction,
     );
-    if (used.affectedRows !== 1) throw wrongCode();
+    if (used !== 1) throw wrongCode();
     if (await hasManager(transaction)) throw alreadySetUp();
     return createPerson({ name, email, password, roles: ["manager"] }, { transaction });
   });

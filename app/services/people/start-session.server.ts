@@ -1,5 +1,5 @@
 import { inTransaction } from "~/db/in-transaction.server";
-import { run } from "./run-sql.server";
+import { insert, run } from "./run-sql.server";
 import { hashSecret, newSecret } from "./secret.server";
 
 /**
@@ -14,7 +14,7 @@ export async function startSession(personId: number, oldId: string | null): Prom
       { old: hashSecret(oldId ?? "") },
       transaction,
     );
-    await run(
+    await insert(
       "INSERT INTO session (id_hash, person_id, expires_at) VALUES (:hash, :personId, NOW(3) + INTERVAL 7 DAY)",
       { hash: hashSecret(id), personId },
       transaction,
