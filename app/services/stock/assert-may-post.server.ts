@@ -1,10 +1,10 @@
-import { QueryTypes, type Transaction } from "sequelize";
-import { sequelize } from "~/db/client.server";
+import type { Transaction } from "sequelize";
 import type { PostedKind } from "~/domain/stock/types";
 import type { Act } from "~/schemas/people/act";
-import { ROLE_NAMES, type Role } from "~/schemas/people/role";
+import { ROLE_NAMES } from "~/schemas/people/role";
 import { mayDo, whoMay } from "~/services/people/permissions";
 import { AppError } from "~/utils/errors";
+import { rolesNow } from "./roles-now.server";
 import type { StockActor } from "./stock-actor";
 
 /** The acts of which one is needed for each kind. */
@@ -33,18 +33,4 @@ export async function assertMayPost(
   if (refused === undefined) return;
   const allowed = [...new Set(ACTS[refused].flatMap(whoMay))].map((role) => ROLE_NAMES[role]);
   throw new AppError("forbidden", `A movement of kind ${refused} is posted by the ${allowed.join(" or ")}.`);
-}
-
-/** The roles the actor came with, less those a person no longer has. */
-export async function rolesNow(actor: StockActor, transaction: Transaction): Promise<readonly Role[]> {
-  if (actor.personId === null) return actor.roles;
-  const rows = await sequelize.query<{ role: Role | null; disabled: 0 | 1 }>(
-    `SELECT person_role.role, person.disabled_at IS NOT NULL AS disabled FROM person
-     LEFT JOIN person_role ON person_role.person_id = person.id WHERE person.id = :personId`,
-    { replacements: { personId: actor.personId }, type: QueryTypes.SELECT, transaction },
-  );
-  if (rows.length === 0 || rows[0].disabled) {
-    throw new AppError("unauthenticated", "This account can no longer sign in; ask the manager.");
-  }
-  return actor.roles.filter((role) => rows.some((row) => row.role === role));
 }
