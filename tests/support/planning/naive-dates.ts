@@ -1,0 +1,59 @@
+import type { IsoDate, PlanLine } from "~/domain/planning/types";
+import type { Shop } from "./factories";
+import { addDays, type Netting } from "./naive-netting";
+
+const later = (a: IsoDate, b: IsoDate) => (a > b ? a : b);
+const some = (values: bigint[], blocks: number[]) => blocks.some((at) => values[at] > 0n);
+
+/** ready(part) of PLANNING.md, section 5, for what the given blocks of kits take of it together. */
+export function naiveReady(shop: Shop, netting: Netting, blocks: number[]): (partNumber: string) => IsoDate {
+  const known = new Map<string, IsoDate>();
+  const linesOf = (partNumber: string) => shop.lines.filter((line) => line.parent === partNumber);
+
+  function netReady(partNumber: string): IsoDate {
+    const part = netting.part(partNumber);
+    const lines = linesOf(partNumber);
+    const bought = part.sourcing === "buy" || (part.sourcing === "make" && lines.length === 0);
+    if (bought) return addDays(shop.today, part.leadTimeDays);
+    const components = lines
+      .filter((line) => some(netting.lineNeed(line), blocks))
+      .map((line) => ready(line.component))
+      .reduce(later, shop.today);
+    return part.sourcing === "phantom" ? components : addDays(components, part.leadTimeDays);
+  }
+
+  function ready(partNumber: string): IsoDate {
+    const before = known.get(partNumber);
+    if (before) return before;
+    const { net, lastDue } = netting.figures(partNumber);
+    const due = blocks.map((at) => lastDue[at] ?? shop.today).reduce(later, shop.today);
+    const date = some(net, blocks) ? later(due, netReady(partNumber)) : due;
+    known.set(partNumber, date);
+    return date;
+  }
+  return ready;
+}
+
+/** needBy of section 5 for one demand with a date; `blocks` are that demand's. */
+export function naiveNeedBy(
+  shop: Shop,
+  netting: Netting,
+  demand: { partNumber: string; due: IsoDate },
+  blocks: number[],
+): (partNumber: string) => IsoDate | null {
+  function through(line: PlanLine): IsoDate[] {
+    if (!some(netting.figures(line.parent).start, blocks)) return [];
+    if (!some(netting.lineNeed(line), blocks)) return [];
+    const parent = netting.part(line.parent);
+    const date = needBy(line.parent);
+    if (date === null) return [];
+    return [parent.sourcing === "phantom" ? date : addDays(date, -parent.leadTimeDays)];
+  }
+
+  function needBy(partNumber: string): IsoDate | null {
+    const own = partNumber === demand.partNumber ? [demand.due] : [];
+    const dates = shop.lines.filter((line) => line.component === partNumber).flatMap(through);
+    return [...own, ...dates].sort()[0] ?? null;
+  }
+  return needBy;
+}
