@@ -31,7 +31,7 @@ export function formatTable(answer: ShipCheck): string {
       { head: "kits", cell: (rung) => String(rung.kits), right: true },
       { head: "kit", cell: (rung) => rung.partNumber },
       { head: "ready on", cell: (rung) => rung.readyOn },
-      { head: "cost", cell: (rung) => rung.cost, right: true },
+      { head: "cost", cell: (rung) => rung.cost ?? "", right: true },
       {
         head: "stopped by",
         cell: (rung) => rung.stoppers.map((one) => `${one.partNumber} ${one.missing}`).join(", "),

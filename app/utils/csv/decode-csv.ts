@@ -1,4 +1,5 @@
 import type { CsvProblem } from "./csv-problem";
+import { decodeWindows1252 } from "./decode-windows-1252";
 
 export type CsvEncoding = "UTF-8" | "UTF-8 with BOM" | "UTF-16LE" | "UTF-16BE" | "Windows-1252";
 
@@ -41,5 +42,5 @@ export function decodeCsv(bytes: Uint8Array): Decoded {
       "a whole, undamaged file",
     );
   }
-  return { ok: true, text: new TextDecoder("windows-1252").decode(bytes), encoding: "Windows-1252" };
+  return { ok: true, text: decodeWindows1252(bytes), encoding: "Windows-1252" };
 }

@@ -1,11 +1,12 @@
+import type { Writable } from "node:stream";
 import { checkShip } from "~/domain/planning/check-ship";
 import { checkPlanFiles } from "~/services/imports/check-plan-files";
 import { sayCsvProblem } from "~/utils/csv/say-csv-problem";
-import { BadInput } from "./plan/bad-input";
-import { formatTable } from "./plan/format-table";
-import { type PlanArguments, parseArguments, usage } from "./plan/parse-arguments";
-import { readInputFile } from "./plan/read-input-file";
-import { sayDemandProblem } from "./plan/say-demand-problem";
+import { BadInput } from "./bad-input";
+import { formatTable } from "./format-table";
+import { type PlanArguments, parseArguments, usage } from "./parse-arguments";
+import { readInputFile } from "./read-input-file";
+import { sayDemandProblem } from "./say-demand-problem";
 
 const mostProblems = 20;
 
@@ -27,7 +28,13 @@ async function answerPlan(given: PlanArguments): Promise<string> {
     : `${JSON.stringify(result.answer, null, 2)}\n`;
 }
 
-function write(stream: NodeJS.WriteStream, text: string): Promise<void> {
+interface Surroundings {
+  stdout: Writable;
+  stderr: Writable;
+  now: Date;
+}
+
+function write(stream: Writable, text: string): Promise<void> {
   return new Promise((resolve) => stream.write(text, () => resolve()));
 }
 
@@ -39,21 +46,21 @@ function sayBadInput(error: BadInput): string {
 }
 
 /** The command line: 0 with the answer on standard output, 2 with sentences on standard error. Needs no database. */
-export async function runPlan(argv: readonly string[], now = new Date()): Promise<number> {
+export async function runPlan(argv: readonly string[], around: Surroundings): Promise<number> {
+  const { stdout, stderr, now } = around;
   // The reader may have gone (a pipe into head): nothing is left to say to it.
-  process.stdout.on("error", () => {});
-  process.stderr.on("error", () => {});
+  for (const stream of [stdout, stderr]) stream.on("error", () => {});
   try {
     const given = parseArguments(argv, now);
-    await write(process.stdout, given === null ? `${usage}\n` : await answerPlan(given));
+    await write(stdout, given === null ? `${usage}\n` : await answerPlan(given));
     return 0;
   } catch (error) {
     if (error instanceof BadInput) {
-      await write(process.stderr, sayBadInput(error));
+      await write(stderr, sayBadInput(error));
       return 2;
     }
     const reason = error instanceof Error ? error.message : String(error);
-    await write(process.stderr, `The plan could not be made, through a fault of the program: ${reason}\n`);
+    await write(stderr, `The plan could not be made, through a fault of the program: ${reason}\n`);
     return 1;
   }
 }
