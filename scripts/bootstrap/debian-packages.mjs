@@ -10,15 +10,17 @@ const packages = {
   chromium: ["chromium"],
 };
 
-/** /usr/sbin holds the server, and is not on an ordinary user's PATH. */
-const alwaysSearched = ["/usr/sbin", "/usr/bin", "/usr/local/sbin", "/usr/local/bin"];
+/** Where programs are looked for: /usr/sbin holds the server, and is not on an ordinary user's PATH. */
+function programFolders() {
+  const always = ["/usr/sbin", "/usr/bin", "/usr/local/sbin", "/usr/local/bin"];
+  return [...(process.env.PATH ?? "").split(":").filter(Boolean), ...always];
+}
 
 /**
  * @param {string} program
  * @returns {string | undefined} its path
  */
-export function findProgram(program) {
-  const folders = [...(process.env.PATH ?? "").split(":").filter(Boolean), ...alwaysSearched];
+export function findProgram(program, folders = programFolders()) {
   return folders.map((folder) => path.join(folder, program)).find(isExecutable);
 }
 
@@ -36,24 +38,35 @@ function isExecutable(file) {
  * Installs the Debian packages that are missing; without the right to, says which.
  * @param {(keyof typeof packages)[]} names
  */
-export async function installDebianPackages(names) {
-  const missing = names.filter((name) => packages[name].some((program) => !findProgram(program)));
+export async function installDebianPackages(
+  names,
+  folders = programFolders(),
+  isRoot = process.getuid?.() === 0,
+) {
+  const missing = findMissing(names, folders);
   if (missing.length === 0) return;
-  const list = missing.join(" ");
-  const apt = findProgram("apt-get");
-  if (process.getuid?.() !== 0 || !apt) {
+  const apt = findProgram("apt-get", folders);
+  if (!isRoot || !apt) {
+    const noun = missing.length > 1 ? "packages" : "package";
     throw new StopSentence(
-      `Cotterpin needs the Debian package${missing.length > 1 ? "s" : ""} ${missing.join(" and ")}: run "sudo apt-get install ${list}" and start again.`,
+      `Cotterpin needs the Debian ${noun} ${missing.join(" and ")}: run "sudo apt-get install ${missing.join(" ")}" and start again.`,
     );
   }
   say(`Installing ${missing.join(" and ")} with apt-get, which may take a minute or two`);
   await install(apt, missing);
-  const still = names.filter((name) => packages[name].some((program) => !findProgram(program)));
-  if (still.length > 0) {
-    throw new StopSentence(
-      `Installing ${still.join(" and ")} did not work: run "apt-get install ${still.join(" ")}" by hand to see why.`,
-    );
-  }
+  const still = findMissing(names, folders);
+  if (still.length === 0) return;
+  throw new StopSentence(
+    `Installing ${still.join(" and ")} did not work: run "apt-get install ${still.join(" ")}" by hand to see why.`,
+  );
+}
+
+/**
+ * @param {(keyof typeof packages)[]} names
+ * @param {string[]} folders
+ */
+function findMissing(names, folders) {
+  return names.filter((name) => packages[name].some((program) => !findProgram(program, folders)));
 }
 
 /**
