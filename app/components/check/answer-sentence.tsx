@@ -6,7 +6,7 @@ export function AnswerSentence({ page }: { page: CheckPageAnswer }) {
   return (
     <p
       aria-live="polite"
-      className="mt-3 min-h-[1.4em] max-w-[62rem] text-balance text-xl leading-snug sm:text-[1.75rem]"
+      className="mt-3 min-h-[1.4em] max-w-[62rem] text-pretty text-xl leading-snug sm:text-[1.75rem]"
     >
       {page.problem ??
         answerWords(page).map((word, place) => (

@@ -1,4 +1,3 @@
-import { useState } from "react";
 import type { IsoDate } from "~/domain/planning/types";
 import { formatDate } from "~/utils/format/format-date";
 
@@ -8,16 +7,12 @@ interface DateBlankProps {
   onChange: (by: IsoDate | null) => void;
 }
 
-/** By when: said in words, and a date field as soon as one comes to it. */
+/** By when: said in words, and a date field over them as soon as one comes to it. */
 export function DateBlank({ by, today, onChange }: DateBlankProps) {
-  const [isTyping, setIsTyping] = useState(false);
   return (
-    <span className="inline-flex items-baseline gap-x-1">
-      <span className="blank relative inline-grid items-baseline">
-        <span
-          aria-hidden="true"
-          className={`col-start-1 row-start-1 font-bold ${isTyping ? "invisible" : ""}`}
-        >
+    <span className="inline-flex items-center gap-x-1">
+      <span className="blank relative">
+        <span aria-hidden="true" className="font-bold">
           {by === null ? "any date" : formatDate(by, { today })}
         </span>
         <input
@@ -28,14 +23,12 @@ export function DateBlank({ by, today, onChange }: DateBlankProps) {
           defaultValue={by ?? ""}
           min="2000-01-01"
           max="2999-12-31"
-          onFocus={() => setIsTyping(true)}
           onBlur={(event) => {
-            setIsTyping(false);
             const next = event.target.value || null;
             if (next !== by && event.target.validity.valid) onChange(next);
           }}
           onKeyDown={(event) => event.key === "Enter" && event.currentTarget.blur()}
-          className="col-start-1 row-start-1 w-[9.5rem] self-center text-lg opacity-0 outline-none focus:opacity-100"
+          className="figure absolute top-0 left-0 z-10 h-full w-full bg-paper text-lg opacity-0 outline-none focus:w-auto focus:min-w-full focus:border-ink focus:border-b-[3px] focus:opacity-100"
         />
       </span>
       {by !== null && (
@@ -43,7 +36,7 @@ export function DateBlank({ by, today, onChange }: DateBlankProps) {
           type="button"
           aria-label="Any date"
           onClick={() => onChange(null)}
-          className="grid size-8 cursor-pointer place-items-center self-center text-soft hover:text-ink print:hidden"
+          className="grid size-8 cursor-pointer place-items-center text-soft hover:text-ink print:hidden"
         >
           <svg
             viewBox="0 0 12 12"

@@ -2,7 +2,6 @@ import type { ChainLink } from "~/domain/planning/types";
 import type { CheckPageAnswer, CheckPart } from "~/schemas/planning/check-answer";
 import { daysBetween, formatDate } from "~/utils/format/format-date";
 import { ChainBar } from "./chain-bar";
-import { partNoun } from "./part-noun";
 
 /** What sets the date: from the kit down to the part that everything waits for, each on one line of time. */
 export function DateChain({ page }: { page: CheckPageAnswer }) {
@@ -51,7 +50,7 @@ function LinkName({ link, part }: { link: ChainLink; part: CheckPart | undefined
     <p className="min-w-0 leading-snug">
       <span className="figure block truncate">{link.partNumber}</span>
       <span className="block text-[0.9375rem] text-soft">
-        {part === undefined ? "" : `${partNoun(part.description)}, `}
+        {part === undefined ? "" : `${part.description.split(",")[0]}, `}
         {reason(link, part)}
       </span>
     </p>

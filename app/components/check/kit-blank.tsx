@@ -11,7 +11,7 @@ export function KitBlank({ kits, kit, onChange }: KitBlankProps) {
   const chosen = kits.find((one) => one.partNumber === kit);
   return (
     <span className="blank relative inline-flex max-w-full items-baseline gap-x-[0.4em]">
-      <span aria-hidden="true" className="figure font-semibold">
+      <span aria-hidden="true" className="figure relative -top-px font-semibold">
         {kit ?? "…"}
       </span>
       {chosen !== undefined && (
@@ -19,12 +19,7 @@ export function KitBlank({ kits, kit, onChange }: KitBlankProps) {
           {chosen.description}
         </span>
       )}
-      <svg
-        viewBox="0 0 10 6"
-        aria-hidden="true"
-        className="mb-[0.15em] h-[0.22em] w-[0.36em] self-center"
-        fill="none"
-      >
+      <svg viewBox="0 0 10 6" aria-hidden="true" className="h-[0.22em] w-[0.36em] self-center" fill="none">
         <path d="M1 1l4 4 4-4" stroke="currentColor" strokeWidth="1.5" />
       </svg>
       <select

@@ -10,10 +10,12 @@ interface LadderRowProps {
   row: Row;
   page: CheckPageAnswer;
   isTopReady: boolean;
+  /** Some rows of the ladder stand for several kits: their numbers take more room. */
+  hasRuns: boolean;
 }
 
 /** One rung with its number, and, where it cannot be climbed, the date, the money and the parts it hangs on. */
-export function LadderRow({ row, page, isTopReady }: LadderRowProps) {
+export function LadderRow({ row, page, isTopReady, hasRuns }: LadderRowProps) {
   const isRun = row.from !== row.to;
   return (
     <tr
@@ -21,15 +23,15 @@ export function LadderRow({ row, page, isTopReady }: LadderRowProps) {
     >
       <th
         scope="row"
-        className={`figure pt-[7px] pr-3 text-right font-normal text-soft ${isRun ? "w-[6.5rem]" : "w-11"}`}
+        className={`figure pt-[7px] pr-2 text-right sm:pr-3 font-normal text-soft ${hasRuns ? "w-[5.5rem] sm:w-[6.5rem]" : "w-8 sm:w-11"}`}
       >
         {isRun ? `${formatNumber(row.from)}–${formatNumber(row.to)}` : row.to}
       </th>
-      <td className="relative w-24 sm:w-36">
+      <td className="relative w-16 sm:w-36">
         <Rung ready={row.ready} isRun={isRun} />
         <span className="sr-only">{row.ready ? "ready" : "stopped"}</span>
       </td>
-      <td className="min-w-0 pt-[7px] pb-3 pl-4">
+      <td className="min-w-0 pt-[7px] pb-3 pl-3 sm:pl-4">
         {row.ready ? (
           <span className={isTopReady ? "" : "sr-only"}>ready now</span>
         ) : (

@@ -22,7 +22,13 @@ export function Ladder({ page }: { page: CheckPageAnswer }) {
         </thead>
         <tbody className="block border-ink border-b-2">
           {rows.toReversed().map((row) => (
-            <LadderRow key={`${row.from}-${row.to}`} row={row} page={page} isTopReady={row.to === topReady} />
+            <LadderRow
+              key={`${row.from}-${row.to}`}
+              row={row}
+              page={page}
+              isTopReady={row.to === topReady}
+              hasRuns={rows.length < page.question.quantity}
+            />
           ))}
         </tbody>
       </table>

@@ -28,7 +28,7 @@ export function OptionsBlank({ options, chosen, onChange }: OptionsBlankProps) {
           <span className="figure font-semibold">{chosen.join(" + ")}</span>
         )}
       </summary>
-      <fieldset className="absolute top-full left-0 z-20 mt-1 w-max max-w-[80vw] border border-edge bg-sheet px-4 py-3 text-base max-sm:-left-20">
+      <fieldset className="absolute top-full left-0 z-20 mt-1 w-max max-w-[80vw] border border-edge bg-sheet px-4 py-3 text-base max-sm:fixed max-sm:inset-x-4 max-sm:top-auto max-sm:w-auto max-sm:max-w-none">
         <legend className="sr-only">Options of the kit</legend>
         {options.map((option) => (
           <label key={option.code} className="flex min-h-9 items-center gap-3">

@@ -21,7 +21,7 @@ export function QuestionSentence({ question, kits, today, onAsk }: QuestionSente
       method="get"
       aria-label="The question"
       onSubmit={(event) => event.preventDefault()}
-      className="flex flex-wrap items-baseline gap-x-[0.35em] gap-y-2 text-2xl sm:text-[2rem] print:text-2xl"
+      className="flex flex-wrap items-center gap-x-[0.35em] gap-y-2 text-2xl leading-[1.5] sm:text-[2rem] print:text-2xl"
     >
       <span>Can we ship</span>
       <NumberBlank quantity={question.quantity} onChange={(quantity) => onAsk({ ...question, quantity })} />
@@ -31,13 +31,13 @@ export function QuestionSentence({ question, kits, today, onAsk }: QuestionSente
         kit={question.kit}
         onChange={(chosen) => onAsk({ ...question, kit: chosen, options: [] })}
       />
-      <span className="flex flex-wrap items-baseline gap-x-[0.35em]">
+      <span className="flex flex-wrap items-center gap-x-[0.35em]">
         <span>by</span>
         <DateBlank by={question.by} today={today} onChange={(by) => onAsk({ ...question, by })} />
         {options.length === 0 && <span className="-ml-[0.3em]">?</span>}
       </span>
       {options.length > 0 && (
-        <span className="flex flex-wrap items-baseline gap-x-[0.35em]">
+        <span className="flex flex-wrap items-center gap-x-[0.35em]">
           <span>with</span>
           <OptionsBlank
             options={options}

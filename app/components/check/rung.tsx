@@ -43,15 +43,15 @@ function BrokenRung({ isRun }: { isRun: boolean }) {
     <>
       {heights.map((y) => (
         <g key={y} strokeWidth={isRun ? 3 : 7}>
-          <line x1="8%" x2="36%" y1={y} y2={y} />
-          <line x1="64%" x2="92%" y1={y} y2={y} />
+          <line x1="8%" x2="30%" y1={y} y2={y} />
+          <line x1="70%" x2="92%" y1={y} y2={y} />
         </g>
       ))}
-      <svg x="36%" y={Y - 6} width="12" height="12" overflow="visible" aria-hidden="true">
-        <path d="M8 1l5 5-5 5" strokeWidth="2" />
+      <svg x="30%" y={Y - 6} width="12" height="12" overflow="visible" aria-hidden="true">
+        <path d="M6 2l4 4-4 4" strokeWidth="2" />
       </svg>
-      <svg x="64%" y={Y - 6} width="12" height="12" overflow="visible" aria-hidden="true">
-        <path d="M-8 1l-5 5 5 5" strokeWidth="2" />
+      <svg x="70%" y={Y - 6} width="12" height="12" overflow="visible" aria-hidden="true">
+        <path d="M-6 2l-4 4 4 4" strokeWidth="2" />
       </svg>
     </>
   );

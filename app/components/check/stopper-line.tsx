@@ -18,14 +18,14 @@ export function StopperLine({ row, asked, seesCosts }: StopperLineProps) {
           <span className="block text-[0.9375rem] text-soft leading-snug">{row.supplier}</span>
         )}
       </th>
-      <td className="max-md:col-span-3 md:py-3 md:pr-3">
+      <td className="max-md:col-span-3 md:pt-[1.15rem] md:pr-4 md:pb-3">
         <KitsCovered stopsAt={row.stopsAt} asked={asked} />
       </td>
       <Figure label="Missing" value={row.missing} />
       <Figure label="On order" value={row.onOrder} />
       <Figure label="Short" value={row.short} isStop={row.isShort} />
-      <td className="text-soft max-md:sr-only md:py-3 md:pr-3">{row.unit === "" ? "each" : row.unit}</td>
-      <td className="figure whitespace-nowrap md:py-3 md:pr-3 md:text-right">
+      <td className="text-soft max-md:sr-only md:py-3 md:pr-4">{row.unit === "" ? "each" : row.unit}</td>
+      <td className="figure whitespace-nowrap md:py-3 md:pr-4 md:text-right">
         <Label text="Here on" />
         <time dateTime={row.hereOnIso}>{row.hereOn}</time>
       </td>
@@ -41,7 +41,7 @@ export function StopperLine({ row, asked, seesCosts }: StopperLineProps) {
 
 function Figure({ label, value, isStop = false }: { label: string; value: string; isStop?: boolean }) {
   return (
-    <td className={`figure md:py-3 md:pr-3 md:text-right ${isStop ? "font-semibold text-stop" : ""}`}>
+    <td className={`figure md:py-3 md:pr-4 md:text-right ${isStop ? "font-semibold text-stop" : ""}`}>
       <Label text={label} />
       {value}
     </td>

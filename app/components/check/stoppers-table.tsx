@@ -30,7 +30,7 @@ export function StoppersTable({ page }: { page: CheckPageAnswer }) {
                 <th
                   key={head}
                   scope="col"
-                  className={`py-2 pr-3 font-normal last:pr-0 ${place > 1 && head !== "Unit" ? "text-right" : ""}`}
+                  className={`whitespace-nowrap py-2 pr-4 font-normal last:pr-0 ${place > 1 && head !== "Unit" ? "text-right" : ""}`}
                 >
                   {head}
                 </th>
