@@ -8,7 +8,16 @@ const bin = "node_modules";
 const lines = [
   [
     { name: "route types", words: [`${bin}/@react-router/dev/bin.js`, "typegen"] },
-    { name: "types", words: [`${bin}/typescript/bin/tsc`, "--noEmit"] },
+    {
+      name: "types",
+      words: [
+        `${bin}/typescript/bin/tsc`,
+        "--noEmit",
+        "--incremental",
+        "--tsBuildInfoFile",
+        "node_modules/.cache/types.tsbuildinfo",
+      ],
+    },
   ],
   [
     { name: "lint and format", words: [`${bin}/@biomejs/biome/bin/biome`, "check", "--error-on-warnings"] },

@@ -8,7 +8,7 @@ import type { StopRequest } from "./stop-request";
 import { watchDatabase } from "./watch-database";
 
 /** The schema of the application on this machine's own server. */
-export const schemaName = "cotterpin";
+const schemaName = "cotterpin";
 
 export interface OpenDatabase {
   addresses: SchemaAddresses;
