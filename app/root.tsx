@@ -20,6 +20,9 @@ import { ErrorPage } from "./routes/auth/error-page";
 
 export const middleware = rootMiddleware;
 
+/** When to come back, for pages that could not be shown. */
+export const headers: Route.HeadersFunction = ({ errorHeaders }) => errorHeaders ?? new Headers();
+
 export const loader = publicLoader(async ({ request }: Route.LoaderArgs, findPerson) => {
   const person = await findPerson();
   return { person: person && presentPerson(person), theme: readTheme(request.headers.get("Cookie")) };

@@ -31,14 +31,23 @@ export function limitBody(request: Request, accepts: readonly BodyType[]): Reque
   const limit = LIMITS[type];
   if (Number(request.headers.get("Content-Length") ?? 0) > limit) throw tooLarge(limit);
   if (!request.body) return request;
-  const body = request.body.pipeThrough(countBytes(limit));
-  return new Request(request.url, {
+  const limited = new Request(request.url, {
     method: request.method,
     headers: request.headers,
     signal: request.signal,
-    body,
+    body: request.body.pipeThrough(countBytes(limit)),
     duplex: "half",
   } as RequestInit);
+  const readForm = limited.formData.bind(limited);
+  limited.formData = () => readForm().catch(refuseBrokenForm);
+  return limited;
+}
+
+/** For what reading a form throws: a body that is no form is the sender's fault, not ours. */
+export function refuseBrokenForm(error: unknown): never {
+  if (error instanceof TypeError)
+    throw new AppError("bad-request", "The form could not be read. Load the page again.");
+  throw error;
 }
 
 function countBytes(limit: number): TransformStream<Uint8Array, Uint8Array> {

@@ -15,6 +15,8 @@ import { formFault } from "./form-fault";
 
 export const meta: Route.MetaFunction = () => [{ title: "Set up the shop · Cotterpin" }];
 
+export const headers: Route.HeadersFunction = ({ actionHeaders }) => actionHeaders;
+
 export const loader = publicLoader(async () => {
   if (await hasManager()) throw redirect("/");
   return null;

@@ -15,6 +15,8 @@ import { formFault } from "./form-fault";
 
 export const meta: Route.MetaFunction = () => [{ title: "Sign in · Cotterpin" }];
 
+export const headers: Route.HeadersFunction = ({ actionHeaders }) => actionHeaders;
+
 export const loader = publicLoader(async ({ url }: Route.LoaderArgs, findPerson) => {
   if (await findPerson()) throw redirect(ownPath(url.searchParams.get("to")));
   const page = await getSignInPage();

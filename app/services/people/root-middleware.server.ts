@@ -77,20 +77,20 @@ const findOutWho: Middleware = async (args, next) => {
   return next();
 };
 
-/** Everything the framework itself answers under /api becomes a problem as well. */
+/** What the framework itself answers under /api becomes a problem as well: above all a method that is not there. */
 const answerInJson: Middleware = async (args, next) => {
   const response = await next();
-  const type = response.headers.get("Content-Type") ?? "";
-  if (!isApi(args) || response.status < 400 || type.includes("json")) return response;
-  if (response.status === 405 || response.status === 400) {
-    return problemResponse({
-      type: "urn:cotterpin:problem:method",
-      title: "Not a method this address takes",
-      status: 405,
-      detail: `${args.request.method} is not possible here.`,
-    });
-  }
-  return problemResponse({ ...toProblem(null), status: response.status });
+  // Answers of our routes are JSON and leave the status's words to the server.
+  const isOurs = response.headers.get("Content-Type")?.includes("json") && response.statusText === "";
+  if (!isApi(args) || response.status < 400 || isOurs) return response;
+  if (response.status >= 500)
+    return problemResponse(toProblem(null, args.context.get(requestFactsContext).id));
+  return problemResponse({
+    type: "urn:cotterpin:problem:method",
+    title: "Not a method this address takes",
+    status: 405,
+    detail: `${args.request.method} is not possible at this address.`,
+  });
 };
 
 /** What runs around every request, outermost first. */

@@ -2,7 +2,7 @@ import { Authenticator } from "remix-auth";
 import { FormStrategy } from "remix-auth-form";
 import { signInSchema } from "~/schemas/people/sign-in";
 import { requestAddress } from "~/utils/request-address";
-import { parseInput } from "~/utils/request-body";
+import { parseInput, refuseBrokenForm } from "~/utils/request-body";
 import { readSessionId } from "~/utils/session-cookie";
 import { checkCredentials } from "./check-credentials.server";
 import { startSession } from "./start-session.server";
@@ -23,6 +23,6 @@ authenticator.use(
  * @throws AppError `invalid` with errors by field or for the whole, `too-many`
  */
 export async function signIn(request: Request): Promise<string> {
-  const personId = await authenticator.authenticate("form", request);
+  const personId = await authenticator.authenticate("form", request).catch(refuseBrokenForm);
   return startSession(personId, readSessionId(request.headers));
 }
