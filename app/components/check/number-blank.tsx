@@ -42,7 +42,7 @@ export function NumberBlank({ quantity, onChange }: NumberBlankProps) {
         <span
           id="quantity-refused"
           role="alert"
-          className="absolute top-full left-0 z-10 mt-2 w-max max-sm:fixed max-sm:inset-x-4 max-sm:top-auto max-sm:w-auto border border-stop bg-sheet px-3 py-1 text-base"
+          className="absolute top-full left-0 z-10 mt-2 w-max max-sm:w-48 border border-stop bg-sheet px-3 py-1 text-base"
         >
           A whole number of kits from 1 to 1,000.
         </span>

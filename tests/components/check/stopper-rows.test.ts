@@ -1,0 +1,32 @@
+import { expect, test } from "vitest";
+import { stopperRows } from "~/components/check/stopper-rows";
+import { buildCheckAnswer, buildCheckPart } from "../../support/build-check-answer";
+
+test("stoppers keep the server's order and are written with their decimals, points in line", () => {
+  const page = buildCheckAnswer({
+    scarce: [
+      { partNumber: "RS-40", stopsAt: 9, perKit: 3 },
+      { partNumber: "HB-2041", stopsAt: 8, perKit: 2 },
+    ],
+  });
+  page.parts = [
+    buildCheckPart({ partNumber: "HB-2041" }),
+    buildCheckPart({ partNumber: "RS-40", unit: "KGM", decimals: 2, cost: null, supplier: null }),
+  ];
+  const rows = stopperRows(page);
+  expect(rows.map((row) => row.partNumber)).toEqual(["RS-40", "HB-2041"]);
+  expect(rows.map((row) => row.missing)).toEqual(["6.00", "6\u00a0\u00a0\u00a0"]);
+  expect(rows.map((row) => row.cost)).toEqual([null, "412.50"]);
+  expect(rows[1]).toMatchObject({
+    stopsAt: 8,
+    hereOn: "10 Jan",
+    supplier: "Northquay Bearings",
+    isShort: true,
+  });
+});
+
+test("a part without a supplier that is made here says so", () => {
+  const page = buildCheckAnswer();
+  page.parts = [buildCheckPart({ partNumber: "HB-2041", supplier: null, sourcing: "make" })];
+  expect(stopperRows(page)[0].supplier).toBe("built here");
+});
