@@ -13,6 +13,7 @@ export class StopRequest {
   readonly #enders: (() => Promise<unknown>)[] = [];
 
   constructor() {
+    this.#followNpm();
     for (const signal of ["SIGTERM", "SIGINT", "SIGHUP"] as const) process.on(signal, () => this.#hear());
   }
 
@@ -36,6 +37,13 @@ export class StopRequest {
       for (const end of this.#enders) await end();
     }
     return this.code;
+  }
+
+  /** npm that is killed outright tells nobody: whoever it ran then has another parent. */
+  #followNpm(): void {
+    if (!process.env.npm_lifecycle_event) return;
+    const parent = process.ppid;
+    setInterval(() => process.ppid !== parent && this.#hear(), 500).unref();
   }
 
   #hear(): void {
