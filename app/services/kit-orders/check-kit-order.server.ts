@@ -1,7 +1,7 @@
 import type { Transaction } from "sequelize";
 import { partKey } from "~/domain/planning/part-key";
 import type { KitOrderInput } from "~/schemas/kit-orders/kit-order";
-import { select } from "~/services/people/run-sql.server";
+import { readRows } from "~/services/planning/read-rows.server";
 import { AppError, type FieldError } from "~/utils/errors";
 import { findKits } from "./find-kits.server";
 
@@ -23,7 +23,7 @@ export async function checkKitOrder(
       { field: "kit", message: `${order.kit} is no kit that can be ordered. Choose one of the list.` },
     ]);
   }
-  const [part] = await select<{ id: number }>(
+  const [part] = await readRows<{ id: number }>(
     "SELECT id FROM part WHERE part_key = :key FOR UPDATE",
     { key },
     transaction,
@@ -50,7 +50,7 @@ async function serialTaker(
   exceptId: number | null,
   transaction: Transaction,
 ): Promise<string | null> {
-  const [taken] = await select<{ number: string }>(
+  const [taken] = await readRows<{ number: string }>(
     `SELECT number FROM kit_order
      WHERE part_id = :partId AND serial = :serial AND state <> 'cancelled' AND id <> :exceptId LIMIT 1`,
     { partId, serial, exceptId: exceptId ?? 0 },

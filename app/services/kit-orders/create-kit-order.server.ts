@@ -5,7 +5,7 @@ import { KitOrderOption } from "~/db/models/orders/kit-order-option";
 import { type KitOrderInput, kitOrderSchema } from "~/schemas/kit-orders/kit-order";
 import { assertMay } from "~/services/people/assert-may.server";
 import type { CurrentPerson } from "~/services/people/current-person";
-import { select } from "~/services/people/run-sql.server";
+import { readRows } from "~/services/planning/read-rows.server";
 import { AppError } from "~/utils/errors";
 import { parseInput } from "~/utils/request-body";
 import { checkKitOrder } from "./check-kit-order.server";
@@ -49,7 +49,7 @@ async function insert(
 }
 
 async function nextNumber(transaction: Transaction): Promise<string> {
-  const [row] = await select<{ last: number | string }>(
+  const [row] = await readRows<{ last: number | string }>(
     `SELECT COALESCE(MAX(CAST(SUBSTRING(number, 4) AS UNSIGNED)), 0) AS last
      FROM kit_order WHERE number REGEXP '^KO-[0-9]{1,9}$'`,
     {},

@@ -1,6 +1,6 @@
 import type { Transaction } from "sequelize";
 import type { OrderableKit } from "~/schemas/kit-orders/presented-kit-order";
-import { select } from "~/services/people/run-sql.server";
+import { readRows } from "~/services/planning/read-rows.server";
 
 interface Row {
   partNumber: string;
@@ -26,7 +26,7 @@ const SELECT_KITS = `WITH RECURSIVE reach (kit_id, part_id) AS (
 /** The kits that can be ordered, by part number, each with the options that its structure offers. */
 export async function findKits(transaction?: Transaction): Promise<OrderableKit[]> {
   const kits = new Map<string, OrderableKit>();
-  for (const row of await select<Row>(SELECT_KITS, {}, transaction)) {
+  for (const row of await readRows<Row>(SELECT_KITS, {}, transaction)) {
     const kit = kits.get(row.partNumber) ?? {
       partNumber: row.partNumber,
       description: row.description,

@@ -1,6 +1,6 @@
 import type { Transaction } from "sequelize";
 import type { PresentedKitOrder } from "~/schemas/kit-orders/presented-kit-order";
-import { select } from "~/services/people/run-sql.server";
+import { readRows } from "~/services/planning/read-rows.server";
 import { AppError } from "~/utils/errors";
 import { SELECT_KIT_ORDERS } from "./kit-order-columns";
 import { type KitOrderRow, presentKitOrder } from "./present-kit-order";
@@ -14,7 +14,7 @@ export async function lockKitOrder(
   version: number,
   transaction: Transaction,
 ): Promise<{ id: number; before: PresentedKitOrder }> {
-  const [row] = await select<KitOrderRow>(
+  const [row] = await readRows<KitOrderRow>(
     `${SELECT_KIT_ORDERS} WHERE o.number = :number FOR UPDATE`,
     { number },
     transaction,

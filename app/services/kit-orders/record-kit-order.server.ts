@@ -1,5 +1,5 @@
 import type { Transaction } from "sequelize";
-import { insert } from "~/services/people/run-sql.server";
+import { appendAuditEvent } from "~/services/audit/append-audit-event.server";
 import { raiseRevision } from "~/services/revision/raise-revision.server";
 
 interface Recorded {
@@ -11,14 +11,9 @@ interface Recorded {
 
 /** Writes what was done to an order into the audit and raises the revision of the orders. */
 export async function recordKitOrder(event: Recorded, transaction: Transaction): Promise<void> {
-  await insert(
-    "INSERT INTO audit_event (actor_id, act, subject, `before`, `after`) VALUES (:actorId, 'kit-orders', :subject, :before, :after)",
-    {
-      actorId: event.actorId,
-      subject: `kit order ${event.number}`,
-      before: event.before === undefined ? null : JSON.stringify(event.before),
-      after: JSON.stringify(event.after),
-    },
+  const { actorId, number, before, after } = event;
+  await appendAuditEvent(
+    { actorId, act: "kit-orders", subject: `kit order ${number}`, before, after },
     transaction,
   );
   await raiseRevision("orders", transaction);
