@@ -1,10 +1,9 @@
 import { sortByLevel } from "../graph/sort-by-level";
 import { partKey } from "./part-key";
 import { findOpenParts } from "./structure/find-open-parts";
-import type { ChosenLines } from "./structure/group-lines";
 import { groupLines, groupQuantityLines, storeRatio } from "./structure/group-lines";
 import { yieldRatio } from "./structure/line-ratio";
-import type { Structure } from "./structure/structure";
+import type { Ratio, Structure } from "./structure/structure";
 import { BUY, isConditional, MAKE, PHANTOM } from "./structure/structure";
 import type { PlanLine, PlanPart, StructureProblem } from "./types";
 
@@ -34,13 +33,18 @@ export function compileStructure(parts: readonly PlanPart[], lines: readonly Pla
     ends.parent[e] = numbers[ends.parent[e]];
     ends.component[e] = numbers[ends.component[e]];
   }
-  const ordered = Array.from(order, (at) => parts[at]);
-  const sourcing = Uint8Array.from(ordered, (part) => SOURCING[part.sourcing]);
+  const ordered = new Array<PlanPart>(parts.length);
+  const sourcing = new Uint8Array(parts.length);
+  const level = new Int32Array(parts.length);
+  for (let n = 0; n < order.length; n++) {
+    ordered[n] = parts[order[n]];
+    sourcing[n] = SOURCING[ordered[n].sourcing];
+    level[n] = levels[order[n]];
+  }
   const open = findOpenParts(parts.length, sourcing, ends.parent, ends.component);
   const misplaced = checkConditions(lines, ends.parent, open);
   if (misplaced.length > 0) return { ok: false, problems: misplaced };
   for (const [key, at] of given) given.set(key, numbers[at]);
-  const level = Int32Array.from(order, (at) => levels[at]);
   return { ok: true, structure: layOut(ordered, lines, ends, { numberOf: given, level, sourcing, open }) };
 }
 
@@ -57,14 +61,23 @@ function indexParts(parts: readonly PlanPart[], problems: StructureProblem[]): M
 function resolveLines(lines: readonly PlanLine[], given: Map<string, number>, problems: StructureProblem[]) {
   const parent = new Int32Array(lines.length);
   const component = new Int32Array(lines.length);
-  const find = (text: string) => given.get(text) ?? given.get(partKey(text));
+  const find = (text: string, line: number, column: "parent" | "component") => {
+    const at = given.get(text) ?? given.get(partKey(text));
+    if (at !== undefined) return at;
+    problems.push({ code: "unknown-part", line, column, partNumber: text });
+    return 0;
+  };
+  let last = "";
+  let lastAt = -1;
   for (let line = 0; line < lines.length && problems.length < MOST_PROBLEMS; line++) {
-    for (const column of ["parent", "component"] as const) {
-      const partNumber = lines[line][column];
-      const at = find(partNumber);
-      if (at === undefined) problems.push({ code: "unknown-part", line, column, partNumber });
-      else (column === "parent" ? parent : component)[line] = at;
+    const one = lines[line];
+    // Lines mostly come parent by parent.
+    if (lastAt < 0 || one.parent !== last) {
+      last = one.parent;
+      lastAt = find(last, line, "parent");
     }
+    parent[line] = lastAt;
+    component[line] = find(one.component, line, "component");
   }
   return { parent, component };
 }
@@ -108,41 +121,57 @@ function layOut(
   ends: { parent: Int32Array; component: Int32Array },
   core: Pick<Structure, "numberOf" | "level" | "sourcing" | "open">,
 ): Structure {
-  const decimals = Uint8Array.from(parts, (part) => part.decimals);
-  const choose = (kind: number): ChosenLines => {
-    const kinds = Int32Array.from(lines.keys()).filter((line) => kindOf(lines[line]) === kind);
-    return { chosen: kinds, ...ends };
-  };
   const hasLines = new Uint8Array(parts.length);
-  for (const p of ends.parent) hasLines[p] = 1;
-  const leaf = core.sourcing.map((sourcing, p) => (sourcing === BUY || !hasLines[p] ? 1 : 0));
+  for (let line = 0; line < lines.length; line++) hasLines[ends.parent[line]] = 1;
+  const chosen = sortByKind(lines);
+  const numbers = readParts(parts, core.sourcing, hasLines);
+  const quantityLines = (kind: number) =>
+    groupQuantityLines({ chosen: chosen[kind], ...ends }, lines, numbers.decimals);
   return {
     ...core,
-    ...compileYields(parts, core.sourcing),
+    ...numbers,
     parts,
-    decimals,
-    leadTime: Int32Array.from(parts, (part) => part.leadTimeDays),
-    leaf,
     openParts: Int32Array.from(core.open.keys()).filter((p) => core.open[p] === 1 && hasLines[p] === 1),
-    fixed: groupQuantityLines(choose(0), lines, decimals),
-    conditional: groupQuantityLines(choose(1), lines, decimals),
-    asRequired: groupLines(parts.length, choose(2)),
+    fixed: quantityLines(FIXED),
+    conditional: quantityLines(CONDITIONAL),
+    asRequired: groupLines(parts.length, { chosen: chosen[AS_REQUIRED], ...ends }),
     lines,
   };
 }
 
-function kindOf(line: PlanLine): number {
-  if (line.quantity === null) return 2;
-  return isConditional(line) ? 1 : 0;
+const FIXED = 0;
+const CONDITIONAL = 1;
+const AS_REQUIRED = 2;
+
+/** Indexes of the lines of each kind, in input order. */
+function sortByKind(lines: readonly PlanLine[]): Int32Array[] {
+  const kinds = new Uint8Array(lines.length);
+  const counts = [0, 0, 0];
+  for (let line = 0; line < lines.length; line++) {
+    const one = lines[line];
+    kinds[line] = one.quantity === null ? AS_REQUIRED : isConditional(one) ? CONDITIONAL : FIXED;
+    counts[kinds[line]]++;
+  }
+  const chosen = counts.map((count) => new Int32Array(count));
+  const filled = [0, 0, 0];
+  for (let line = 0; line < lines.length; line++) chosen[kinds[line]][filled[kinds[line]]++] = line;
+  return chosen;
 }
 
-function compileYields(parts: PlanPart[], sourcing: Uint8Array) {
+function readParts(parts: PlanPart[], sourcing: Uint8Array, hasLines: Uint8Array) {
+  const decimals = new Uint8Array(parts.length);
+  const leadTime = new Int32Array(parts.length);
+  const leaf = new Uint8Array(parts.length);
   const yieldNum = new Float64Array(parts.length).fill(1);
   const yieldDen = new Float64Array(parts.length).fill(1);
-  const wideYield = new Map<number, { num: bigint; den: bigint }>();
+  const wideYield = new Map<number, Ratio>();
   for (let p = 0; p < parts.length; p++) {
-    if (sourcing[p] !== MAKE || parts[p].yield === "1") continue;
-    storeRatio({ num: yieldNum, den: yieldDen, wide: wideYield }, p, yieldRatio(parts[p].yield));
+    const part = parts[p];
+    decimals[p] = part.decimals;
+    leadTime[p] = part.leadTimeDays;
+    leaf[p] = sourcing[p] === BUY || hasLines[p] === 0 ? 1 : 0;
+    if (sourcing[p] !== MAKE || part.yield === "1") continue;
+    storeRatio({ num: yieldNum, den: yieldDen, wide: wideYield }, p, yieldRatio(part.yield));
   }
-  return { yieldNum, yieldDen, wideYield };
+  return { decimals, leadTime, leaf, yieldNum, yieldDen, wideYield };
 }

@@ -4,14 +4,14 @@ import type { Supplies } from "./compile-supplies";
 import { countBeyond } from "./netting/count-shippable";
 import type { PartDebt } from "./netting/find-debts";
 import { findDebts } from "./netting/find-debts";
-import { OutOfRange } from "./netting/lane";
+import { branchLane, OutOfRange } from "./netting/lane";
 import { isLimited } from "./netting/limits";
 import type { Engine } from "./netting/pass-state";
 import { numberEngine } from "./netting/run-pass";
 import { wideEngine } from "./netting/run-wide-pass";
-import type { Served } from "./netting/serve-demands";
 import { serveDemands } from "./netting/serve-demands";
 import { releaseOrder, stockTakenByDemand } from "./netting/serve-released";
+import type { Served } from "./netting/served";
 import type { Segment, SplitDemand } from "./netting/split-demand";
 import { splitDemand } from "./netting/split-demand";
 import type { Structure } from "./structure/structure";
@@ -23,6 +23,8 @@ export interface PlanShipInput {
   /** In the order of service, at least one. */
   demand: readonly PlanDemand[];
   sharing: Sharing;
+  /** Served before the demands and left out of the answer, such as the open kit orders. */
+  first?: readonly PlanDemand[];
 }
 
 /** The plan in whole steps and numbers of the structure; `presentShipCheck` makes the answer of it. */
@@ -48,29 +50,47 @@ export type PlanShipResult = { ok: true; plan: ShipPlan } | { ok: false; problem
  * as every quantity stays below 2^53 steps, else all of it in BigInt.
  */
 export function planShip(input: PlanShipInput): PlanShipResult {
-  const { structure, supplies, demand } = input;
-  const results = demand.map((one, index) => splitDemand(structure, one, index, supplies.today));
-  const problems = results.flatMap((result) => (result.ok ? [] : [result.problem]));
-  if (problems.length > 0) return { ok: false, problems };
-  const splits = results.flatMap((result) => (result.ok ? [result.split] : []));
-  const isWide =
-    supplies.wide || splits.some((split) => split.segments.some(({ kits }) => typeof kits === "bigint"));
-  if (isWide) return { ok: true, plan: plan(input, splits, wideEngine) };
+  const { structure, supplies, demand, first = [] } = input;
+  const asked = splitAll(structure, demand, supplies.today);
+  if (!asked.ok) return asked;
+  const earlier = splitAll(structure, first, supplies.today);
+  if (!earlier.ok) throw new Error("What is served first cannot be planned.");
+  const work = { ...input, splits: asked.splits, before: earlier.splits.flatMap(({ segments }) => segments) };
+  const kits = [...work.before, ...asked.splits.flatMap(({ segments }) => segments)];
+  if (supplies.wide || kits.some((segment) => typeof segment.kits === "bigint")) {
+    return { ok: true, plan: plan(work, wideEngine) };
+  }
   try {
-    return { ok: true, plan: plan(input, splits, numberEngine) };
+    return { ok: true, plan: plan(work, numberEngine) };
   } catch (error) {
     if (!(error instanceof OutOfRange)) throw error;
-    return { ok: true, plan: plan(input, splits, wideEngine) };
+    return { ok: true, plan: plan(work, wideEngine) };
   }
 }
 
-function plan(input: PlanShipInput, splits: readonly SplitDemand[], engine: Engine): ShipPlan {
-  const { structure, supplies, demand, sharing } = input;
+type SplitAll = { ok: true; splits: SplitDemand[] } | { ok: false; problems: DemandProblem[] };
+
+function splitAll(structure: Structure, demand: readonly PlanDemand[], today: number): SplitAll {
+  const results = demand.map((one, index) => splitDemand(structure, one, index, today));
+  const problems = results.flatMap((result) => (result.ok ? [] : [result.problem]));
+  if (problems.length > 0) return { ok: false, problems };
+  return { ok: true, splits: results.flatMap((result) => (result.ok ? [result.split] : [])) };
+}
+
+interface PlanWork extends PlanShipInput {
+  before: Segment[];
+  splits: SplitDemand[];
+}
+
+function plan(work: PlanWork, engine: Engine): ShipPlan {
+  const { structure, supplies, demand, sharing, before, splits } = work;
   const asked = splits.flatMap((split) => split.segments);
-  const release = sharing === "release" ? releaseOrder(structure, supplies, splits, engine) : null;
+  const base = { structure, supplies, engine, first: before };
+  const release = sharing === "release" ? releaseOrder({ ...base, splits }) : null;
   const segments = release ? release.segments : asked;
-  const served = serveDemands(structure, supplies, segments, engine);
-  const takenBy = (order: Segment[]) => stockTakenByDemand(structure, supplies, order, demand.length, engine);
+  const served = serveDemands({ ...base, segments });
+  const takenBy = (order: Segment[]) =>
+    stockTakenByDemand({ ...base, segments: order, demands: demand.length });
   return {
     structure,
     supplies,
@@ -95,7 +115,7 @@ function strictBuildable(splits: readonly SplitDemand[], served: Served): (Steps
       sum = addSteps(sum, kits);
     }
     if (!complete || index < splits.length - 1) return sum;
-    const more = countBeyond(served.lanes.now, split.beyond);
+    const more = countBeyond(branchLane(served.lanes.now), split.beyond);
     return more === null ? null : addSteps(sum, more);
   });
 }

@@ -52,6 +52,8 @@ export interface PlanStock {
   partNumber: string;
   quantity: DecimalString;
   expiresOn: IsoDate | null;
+  /** Only told apart where a what-if holds one lot. */
+  lot?: string | null;
   nowOnly?: boolean;
 }
 

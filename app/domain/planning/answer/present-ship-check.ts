@@ -1,5 +1,5 @@
 import { formatSteps } from "../../quantity/format-steps";
-import type { Steps } from "../../quantity/steps";
+import { type Steps, subtractSteps } from "../../quantity/steps";
 import { isoDate } from "../dates/day-number";
 import { NEVER } from "../dates/need-dates";
 import type { Amounts } from "../netting/pass-state";
@@ -74,18 +74,19 @@ function presentLadder({ structure, served }: ShipPlan): Rung[] {
 
 function presentShortages(plan: ShipPlan): Shortage[] {
   const { structure, served } = plan;
-  const { now, coming, ready, stopsAt, needBy } = served;
+  const { before, now, coming, ready, stopsAt, needBy } = served;
   const shortages: Shortage[] = [];
   for (const [part, first] of stopsAt) {
-    const say = (amounts: Amounts) => formatSteps(amounts[part], structure.decimals[part]);
+    const say = (after: Amounts, earlier: Amounts) =>
+      formatSteps(subtractSteps(after[part], earlier[part]), structure.decimals[part]);
     shortages.push({
       partNumber: structure.parts[part].partNumber,
       unit: structure.parts[part].unit,
-      gross: say(coming.gross),
-      fromStock: say(coming.fromStock),
-      onOrder: say(coming.onOrder),
-      short: say(coming.net),
-      missing: say(now.net),
+      gross: say(coming.gross, before.coming.gross),
+      fromStock: say(coming.fromStock, before.coming.fromStock),
+      onOrder: say(coming.onOrder, before.coming.onOrder),
+      short: say(coming.net, before.coming.net),
+      missing: say(now.net, before.now.net),
       stopsAt: Number(first),
       needBy: needBy[part] === NEVER ? null : isoDate(needBy[part]),
       orderBy: orderBy(plan, part),
@@ -104,18 +105,20 @@ function orderBy({ structure, supplies, served }: ShipPlan, part: number): IsoDa
 }
 
 function presentBuilds({ structure, served }: ShipPlan): ShipCheck["builds"] {
-  const { gross, fromStock, onOrder, start } = served.coming;
+  const { coming, before } = served;
   const builds: ShipCheck["builds"] = [];
   for (let p = 0; p < structure.parts.length; p++) {
-    if (structure.sourcing[p] !== MAKE || structure.leaf[p] || !(start[p] > 0)) continue;
-    const say = (amounts: Amounts) => formatSteps(amounts[p], structure.decimals[p]);
+    if (structure.sourcing[p] !== MAKE || structure.leaf[p]) continue;
+    if (!(coming.start[p] > before.coming.start[p])) continue;
+    const say = (after: Amounts, earlier: Amounts) =>
+      formatSteps(subtractSteps(after[p], earlier[p]), structure.decimals[p]);
     builds.push({
       partNumber: structure.parts[p].partNumber,
       unit: structure.parts[p].unit,
-      gross: say(gross),
-      fromStock: say(fromStock),
-      onOrder: say(onOrder),
-      build: say(start),
+      gross: say(coming.gross, before.coming.gross),
+      fromStock: say(coming.fromStock, before.coming.fromStock),
+      onOrder: say(coming.onOrder, before.coming.onOrder),
+      build: say(coming.start, before.coming.start),
     });
   }
   return builds.sort(byPartNumber);

@@ -2,24 +2,31 @@ import type { Steps } from "../../quantity/steps";
 import { addSteps, narrowSteps } from "../../quantity/steps";
 import type { Lane, Offer } from "./lane";
 import { tryKits } from "./lane";
+import type { PassState } from "./pass-state";
 import type { Segment } from "./split-demand";
+
+interface FirstStopsInput {
+  lane: Lane;
+  offer: Offer;
+  segment: Segment;
+  /** Kits of the segment that have a rung already. */
+  rungs: number;
+  served: Steps;
+  stopsAt: Map<number, Steps>;
+  before: { now: PassState };
+}
 
 /**
  * For parts that the segment lacks only past the rungs drawn: the first kit each one stops, by halving.
  * The lane's last try must be the whole segment. Writes into `stopsAt`, counting from `served`.
  */
-export function findFirstStops(
-  lane: Lane,
-  offer: Offer,
-  segment: Segment,
-  rungs: number,
-  served: Steps,
-  stopsAt: Map<number, Steps>,
-): void {
+export function findFirstStops(input: FirstStopsInput): void {
+  const { lane, offer, segment, rungs, served, stopsAt, before } = input;
   const { leaf } = lane.structure;
+  const old = before.now.net;
   const lacking: number[] = [];
   for (let p = 0; p < leaf.length; p++) {
-    if (leaf[p] && lane.next.net[p] > 0 && !stopsAt.has(p)) lacking.push(p);
+    if (leaf[p] && lane.next.net[p] > old[p] && !stopsAt.has(p)) lacking.push(p);
   }
   const open = [{ low: BigInt(rungs), high: BigInt(segment.kits), parts: lacking }];
   for (let range = open.pop(); range; range = open.pop()) {
@@ -31,7 +38,7 @@ export function findFirstStops(
     }
     const middle = (low + high) / 2n;
     const { net } = tryKits(lane, offer, segment, narrowSteps(middle));
-    open.push({ low, high: middle, parts: parts.filter((p) => net[p] > 0) });
-    open.push({ low: middle, high, parts: parts.filter((p) => !(net[p] > 0)) });
+    open.push({ low, high: middle, parts: parts.filter((p) => net[p] > old[p]) });
+    open.push({ low: middle, high, parts: parts.filter((p) => !(net[p] > old[p])) });
   }
 }

@@ -2,7 +2,7 @@ import type { Steps } from "../../quantity/steps";
 import type { Structure } from "../structure/structure";
 import { kitSteps } from "../structure/structure";
 import type { Amounts, Engine, PassState } from "./pass-state";
-import { emptyState } from "./pass-state";
+import { copyState, emptyState } from "./pass-state";
 import type { Left, Pool } from "./pool";
 import { available, fullBuckets, takeFrom } from "./pool";
 import type { Segment } from "./split-demand";
@@ -44,6 +44,18 @@ export function openLane(input: LaneInput): Lane {
     ordersLeft: input.orders ? fullBuckets(input.orders) : new Map(),
     state: emptyState(input.structure, input.engine),
     next: emptyState(input.structure, input.engine),
+  };
+}
+
+/** A lane that goes on from here by itself: what it serves is not served in the other. */
+export function branchLane(lane: Lane): Lane {
+  const copy = (left: Left): Left => new Map([...left].map(([part, quantities]) => [part, [...quantities]]));
+  return {
+    ...lane,
+    stockLeft: copy(lane.stockLeft),
+    ordersLeft: copy(lane.ordersLeft),
+    state: copyState(lane.state, lane.engine),
+    next: emptyState(lane.structure, lane.engine),
   };
 }
 

@@ -59,3 +59,21 @@ export function emptyState(structure: Structure, engine: Engine): PassState {
     asked: new Map(),
   };
 }
+
+/** The same figures in arrays of their own: a lane writes over its own ones. */
+export function copyState(state: PassState, engine: Engine): PassState {
+  const copy = (amounts: Amounts) => {
+    const own = engine.zeros(amounts.length);
+    for (let k = 0; k < amounts.length; k++) own[k] = amounts[k];
+    return own;
+  };
+  return {
+    gross: copy(state.gross),
+    fromStock: copy(state.fromStock),
+    onOrder: copy(state.onOrder),
+    net: copy(state.net),
+    start: copy(state.start),
+    throughLine: copy(state.throughLine),
+    asked: new Map(state.asked),
+  };
+}

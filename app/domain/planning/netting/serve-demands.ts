@@ -5,48 +5,13 @@ import { criticalChain } from "../dates/critical-chain";
 import { NEVER, needForSegment, spreadNeed } from "../dates/need-dates";
 import { readyDates, readyForSegment } from "../dates/ready-dates";
 import type { Structure } from "../structure/structure";
-import type { ChainLink } from "../types";
 import { countShippable } from "./count-shippable";
 import { findFirstStops } from "./find-first-stops";
 import type { Lane, Offer } from "./lane";
 import { addsNoShortage, keepKits, offerTo, openLane, tryKits } from "./lane";
-import type { Engine, PassState } from "./pass-state";
+import { copyState, type Engine, emptyState, type PassState } from "./pass-state";
+import { MOST_RUNGS, type Served } from "./served";
 import type { Segment } from "./split-demand";
-
-/** Most rungs that a ladder draws. */
-export const MOST_RUNGS = 1000;
-
-/** One rung of the ladder, by part numbers of the structure. */
-export interface ServedRung {
-  part: number;
-  kits: number;
-  stoppers: { part: number; missing: Steps }[];
-  /** Short in the pass *coming*. */
-  short: { part: number; short: Steps }[];
-  readyOn: number;
-}
-
-/** Everything the answer is made of, after all demands are served. */
-export interface Served {
-  now: PassState;
-  /** Open orders by the demands' dates. */
-  coming: PassState;
-  /** Every open order; the same object as `coming` where no demand has a date. */
-  all: PassState;
-  lanes: { now: Lane };
-  rungs: ServedRung[];
-  /** Complete kits by segment, in the order of service. */
-  shippable: Steps[];
-  /** Day by segment. */
-  earliest: number[];
-  ready: Int32Array;
-  chain: ChainLink[];
-  stopsAt: Map<number, Steps>;
-  needBy: Int32Array;
-  /** 1 where a demand with, or without, a date is short of the part. */
-  shortDated: Uint8Array;
-  shortUndated: Uint8Array;
-}
 
 interface Run extends Omit<Served, "now" | "coming" | "all" | "lanes"> {
   structure: Structure;
@@ -58,14 +23,26 @@ interface Run extends Omit<Served, "now" | "coming" | "all" | "lanes"> {
   latest: number;
 }
 
+export interface ServeInput {
+  structure: Structure;
+  supplies: Supplies;
+  /** Served first, without rungs: the answer is what comes on top of them. */
+  first: readonly Segment[];
+  segments: readonly Segment[];
+  engine: Engine;
+}
+
 /** Serves the segments in the order given: both passes, ladder, dates (PLANNING.md, sections 3 to 5). */
-export function serveDemands(
-  structure: Structure,
-  supplies: Supplies,
-  segments: readonly Segment[],
-  engine: Engine,
-): Served {
-  const run = openRun(structure, supplies, segments, engine);
+export function serveDemands(input: ServeInput): Served {
+  const { structure, supplies, first, segments, engine } = input;
+  const run = openRun(input);
+  if (first.length > 0) {
+    for (const segment of first) serveSilently(run, segment);
+    run.before = {
+      now: copyState(run.nowLane.state, engine),
+      coming: copyState(run.comingLane.state, engine),
+    };
+  }
   for (const segment of segments) serveSegment(run, segment);
   const { nowLane, comingLane, allLane } = run;
   readyDates(structure, supplies, allLane.state, run.ready);
@@ -79,15 +56,11 @@ export function serveDemands(
   };
 }
 
-function openRun(
-  structure: Structure,
-  supplies: Supplies,
-  segments: readonly Segment[],
-  engine: Engine,
-): Run {
+function openRun({ structure, supplies, first, segments, engine }: ServeInput): Run {
   const { stockNow, stockComing, orders, today } = supplies;
   const base = { structure, engine, today };
-  const dated = segments.some((segment) => segment.due !== null);
+  const dated = [...first, ...segments].some((segment) => segment.due !== null);
+  const nothing = emptyState(structure, engine);
   const comingLane = openLane({ ...base, stock: stockComing, orders, byDate: true });
   const parts = structure.parts.length;
   return {
@@ -96,6 +69,7 @@ function openRun(
     nowLane: openLane({ ...base, stock: stockNow, orders: null, byDate: false }),
     comingLane,
     allLane: dated ? openLane({ ...base, stock: stockComing, orders, byDate: false }) : comingLane,
+    before: { now: nothing, coming: nothing },
     served: 0,
     latest: Number.NEGATIVE_INFINITY,
     rungs: [],
@@ -116,13 +90,26 @@ interface Offers {
   all: Offer;
 }
 
-function serveSegment(run: Run, segment: Segment): void {
-  const { nowLane, comingLane, allLane } = run;
-  const offers = {
+function offersTo({ nowLane, comingLane, allLane }: Run, segment: Segment): Offers {
+  return {
     now: offerTo(nowLane, segment),
     coming: offerTo(comingLane, segment),
     all: offerTo(allLane, segment),
   };
+}
+
+function serveSilently(run: Run, segment: Segment): void {
+  tryLanes(run, segment, offersTo(run, segment), segment.kits);
+  for (const lane of lanesOf(run)) keepKits(lane, segment);
+}
+
+function lanesOf({ nowLane, comingLane, allLane }: Run): Set<Lane> {
+  return new Set([nowLane, comingLane, allLane]);
+}
+
+function serveSegment(run: Run, segment: Segment): void {
+  const { nowLane } = run;
+  const offers = offersTo(run, segment);
   const climbed = climbRungs(run, segment, offers);
   if (climbed.rungs < segment.kits) {
     tryLanes(run, segment, offers, segment.kits);
@@ -130,7 +117,7 @@ function serveSegment(run: Run, segment: Segment): void {
       climbed.free = countShippable(nowLane, segment, climbed.free, segment.kits);
       tryKits(nowLane, offers.now, segment, segment.kits);
     }
-    findFirstStops(nowLane, offers.now, segment, climbed.rungs, run.served, run.stopsAt);
+    findFirstStops({ ...run, lane: nowLane, offer: offers.now, segment, rungs: climbed.rungs });
     tryKits(nowLane, offers.now, segment, segment.kits);
   }
   const readyOn = dateSegment(run, segment);
@@ -138,7 +125,7 @@ function serveSegment(run: Run, segment: Segment): void {
   run.earliest.push(readyOn);
   keepNeeds(run, segment);
   keepChain(run, segment, readyOn);
-  for (const lane of new Set([nowLane, comingLane, allLane])) keepKits(lane, segment);
+  for (const lane of lanesOf(run)) keepKits(lane, segment);
   run.latest = Math.max(run.latest, readyOn);
   run.served = addSteps(run.served, segment.kits);
 }
@@ -153,9 +140,15 @@ function climbRungs(run: Run, segment: Segment, offers: Offers): { rungs: number
     const { structure, nowLane } = run;
     if (free === kits - 1 && addsNoShortage(structure, nowLane.state, nowLane.next)) free = kits;
     const at = Number(run.served) + kits;
-    const stoppers = lackOf(structure, nowLane.next).map(({ part, lack }) => ({ part, missing: lack }));
+    const stoppers = lackOf(structure, nowLane.next, run.before.now).map(({ part, lack }) => ({
+      part,
+      missing: lack,
+    }));
     for (const { part } of stoppers) if (!run.stopsAt.has(part)) run.stopsAt.set(part, at);
-    const short = lackOf(structure, run.comingLane.next).map(({ part, lack }) => ({ part, short: lack }));
+    const short = lackOf(structure, run.comingLane.next, run.before.coming).map(({ part, lack }) => ({
+      part,
+      short: lack,
+    }));
     const readyOn = Math.max(run.latest, dateSegment(run, segment));
     run.rungs.push({ part: segment.part, kits: at, stoppers, short, readyOn });
   }
@@ -168,11 +161,15 @@ function tryLanes(run: Run, segment: Segment, offers: Offers, kits: Steps): void
   if (run.allLane !== run.comingLane) tryKits(run.allLane, offers.all, segment, kits);
 }
 
-function lackOf(structure: Structure, state: PassState): { part: number; lack: Steps }[] {
+/** Leaves that lack more than they did before the kits asked for. */
+function lackOf(structure: Structure, state: PassState, before: PassState): { part: number; lack: Steps }[] {
   const lacking: { part: number; lack: Steps }[] = [];
   const { leaf } = structure;
   const { net } = state;
-  for (let p = 0; p < leaf.length; p++) if (leaf[p] && net[p] > 0) lacking.push({ part: p, lack: net[p] });
+  for (let p = 0; p < leaf.length; p++) {
+    if (leaf[p] && net[p] > before.net[p])
+      lacking.push({ part: p, lack: subtractSteps(net[p], before.net[p]) });
+  }
   return lacking;
 }
 

@@ -8,6 +8,14 @@ import { keepKits, offerTo, openLane, tryKits } from "./lane";
 import type { Engine } from "./pass-state";
 import type { Segment, SplitDemand } from "./split-demand";
 
+interface NowInput {
+  structure: Structure;
+  supplies: Supplies;
+  /** Served before all others. */
+  first: readonly Segment[];
+  engine: Engine;
+}
+
 /** The order in which kits go when a later complete one may pass an earlier one that waits. */
 export interface ReleasedOrder {
   /** Kits that ship, then those that wait, each in the order asked. */
@@ -17,13 +25,9 @@ export interface ReleasedOrder {
 }
 
 /** Takes the kits one by one in their order: each that is complete with what is left ships (section 4). */
-export function releaseOrder(
-  structure: Structure,
-  supplies: Supplies,
-  splits: readonly SplitDemand[],
-  engine: Engine,
-): ReleasedOrder {
-  const lane = openNowLane(structure, supplies, engine);
+export function releaseOrder(input: NowInput & { splits: readonly SplitDemand[] }): ReleasedOrder {
+  const { splits } = input;
+  const lane = openNowLane(input);
   const ship: Segment[] = [];
   const wait: Segment[] = [];
   const buildable: (Steps | null)[] = [];
@@ -50,13 +54,10 @@ export function releaseOrder(
 
 /** What each demand takes from stock in the pass *now*, by demand and part. */
 export function stockTakenByDemand(
-  structure: Structure,
-  supplies: Supplies,
-  segments: readonly Segment[],
-  demands: number,
-  engine: Engine,
+  input: NowInput & { segments: readonly Segment[]; demands: number },
 ): Map<number, Steps>[] {
-  const lane = openNowLane(structure, supplies, engine);
+  const { segments, demands } = input;
+  const lane = openNowLane(input);
   const taken = Array.from({ length: demands }, () => new Map<number, Steps>());
   for (const segment of segments) {
     const before = lane.state.fromStock;
@@ -71,9 +72,11 @@ export function stockTakenByDemand(
   return taken;
 }
 
-function openNowLane(structure: Structure, supplies: Supplies, engine: Engine): Lane {
+function openNowLane({ structure, supplies, first, engine }: NowInput): Lane {
   const { stockNow, today } = supplies;
-  return openLane({ structure, engine, today, stock: stockNow, orders: null, byDate: false });
+  const lane = openLane({ structure, engine, today, stock: stockNow, orders: null, byDate: false });
+  for (const segment of first) serveNow(lane, segment, segment.kits);
+  return lane;
 }
 
 function serveNow(lane: Lane, segment: Segment, kits: Steps): void {

@@ -1,0 +1,41 @@
+import type { Steps } from "../../quantity/steps";
+import type { ChainLink } from "../types";
+import type { Lane } from "./lane";
+import type { PassState } from "./pass-state";
+
+/** Most rungs that a ladder draws. */
+export const MOST_RUNGS = 1000;
+
+/** One rung of the ladder, by part numbers of the structure. */
+export interface ServedRung {
+  part: number;
+  kits: number;
+  stoppers: { part: number; missing: Steps }[];
+  /** Short in the pass *coming*. */
+  short: { part: number; short: Steps }[];
+  readyOn: number;
+}
+
+/** Everything the answer is made of, after all demands are served. */
+export interface Served {
+  /** Where the kits asked for begin: what was served before them, nothing by default. */
+  before: { now: PassState; coming: PassState };
+  now: PassState;
+  /** Open orders by the demands' dates. */
+  coming: PassState;
+  /** Every open order; the same object as `coming` where no demand has a date. */
+  all: PassState;
+  lanes: { now: Lane };
+  rungs: ServedRung[];
+  /** Complete kits by segment, in the order of service. */
+  shippable: Steps[];
+  /** Day by segment. */
+  earliest: number[];
+  ready: Int32Array;
+  chain: ChainLink[];
+  stopsAt: Map<number, Steps>;
+  needBy: Int32Array;
+  /** 1 where a demand with, or without, a date is short of the part. */
+  shortDated: Uint8Array;
+  shortUndated: Uint8Array;
+}
