@@ -114,7 +114,7 @@ function addLead(book: Book, lead: Lead): void {
     Number(((lead.millimetres + 20) / 1000).toFixed(3)),
     { scrap: 0.03 },
   );
-  const kinds = TERMINALS.find((group) => size <= group.upTo)!.ends;
+  const kinds = bySize(TERMINALS, size).ends;
   const first = chances.pick(kinds);
   const second = chances.pick(kinds);
   for (const [partNumber, description, cost] of [first, second]) {
@@ -131,7 +131,7 @@ function addLead(book: Book, lead: Lead): void {
   }
   if (first === second) book.addLine(lead.number, first[0], 2);
   else for (const end of [first, second]) book.addLine(lead.number, end[0], 1);
-  const sleeve = SLEEVES.find((group) => size <= group.upTo)!;
+  const sleeve = bySize(SLEEVES, size);
   if (!book.parts.has(sleeve.partNumber))
     book.add({
       partNumber: sleeve.partNumber,
@@ -180,4 +180,8 @@ function addWire(book: Book, size: number, colour: string, colourName: string): 
     mass,
   });
   return partNumber;
+}
+
+function bySize<Group extends { upTo: number }>(groups: readonly Group[], size: number): Group {
+  return groups.find(({ upTo }) => size <= upTo) ?? groups[groups.length - 1];
 }

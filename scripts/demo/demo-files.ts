@@ -78,7 +78,7 @@ function partRow(part: BookPart): Cell[] {
     "",
     cheap ? 56 : "",
     part.yield === 1 ? "" : part.yield,
-    part.cost === null ? "" : part.cost.toFixed((part.cost * 100) % 1 === 0 ? 2 : 3),
+    part.cost === null ? "" : money(part.cost),
     part.mass === null ? "" : part.mass.toFixed(part.mass < 0.01 ? 4 : 3),
     part.sold ? 1 : "",
   ];
@@ -246,6 +246,9 @@ function movementsFile(book: Book, movements: readonly PastMovement[]): string {
     ]),
   );
 }
+
+/** Cents, and tenths of a cent where pennies count. */
+const money = (cost: number) => cost.toFixed(cost < 1 ? 3 : 2);
 
 const amount = (book: Book, partNumber: string, steps: number) =>
   (steps / 10 ** book.part(partNumber).decimals).toFixed(book.part(partNumber).decimals);

@@ -48,10 +48,10 @@ function describeScrew(partNumber: string): Fastener | null {
   const diameter = Number(thread);
   const head = kind === "G" || kind === "S" ? 0 : diameter * 1.8;
   const mass = 0.785 * diameter * diameter * (Number(length) + head) * STEEL_KG_PER_MM3;
-  const full = kind === "B" && Number(length) <= 25 ? ", fully threaded" : "";
+  const name = kind === "B" && Number(length) <= 25 ? "Screw, hexagon" : SCREWS[kind];
   return bought(
     partNumber,
-    `${SCREWS[kind]}${full}, M${thread} x ${length}, ${GRADES[grade].name}`,
+    `${name}, M${thread} x ${length}, ${GRADES[grade].name}`,
     mass,
     0.04 + mass * 5.5 * GRADES[grade].price,
   );

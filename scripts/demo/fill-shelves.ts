@@ -114,11 +114,11 @@ export function fillShelves(book: Book): StockRow[] {
   );
   const rows: StockRow[] = [];
   for (const [partNumber, steps] of usable)
-    if (steps > 0) rows.push(...shelve(book.part(partNumber), steps, homes.get(partNumber)!));
+    if (steps > 0) rows.push(...shelve(book.part(partNumber), steps, homes.get(partNumber) ?? ""));
   for (const [index, row] of OUT_OF_REACH.entries()) {
     rows.push({
       ...row,
-      bin: row.state === "held" ? heldBins[index % heldBins.length] : homes.get(row.partNumber)!,
+      bin: row.state === "held" ? heldBins[index % heldBins.length] : (homes.get(row.partNumber) ?? ""),
     });
   }
   return rows.sort(
@@ -135,7 +135,7 @@ function chooseUsable(book: Book): Map<string, number> {
   const usable = new Map(built);
   for (const part of book.parts.values()) {
     if (part.sourcing !== "buy") continue;
-    const need = (kits: number) => needs.get(kits)!.get(part.partNumber) ?? 0;
+    const need = (kits: number) => needs.get(kits)?.get(part.partNumber) ?? 0;
     const stopper = stoppers.find(({ partNumber }) => partNumber === part.partNumber);
     if (stopper) {
       const enough = need(stopper.stopsAt - 1);

@@ -13,7 +13,7 @@ const LIST: [string, string, string, string, string, number, string, string][] =
   [
     "KO-0147",
     "S2",
-    "Ottilie Brandreth, Reedham Staithe",
+    "Ottilie Brandreth, Redholm Staithe",
     "029",
     "2026-12-11",
     10,
@@ -64,7 +64,7 @@ const LIST: [string, string, string, string, string, number, string, string][] =
   [
     "KO-0154",
     "S2",
-    "Nessa Corrigall, Stroma View",
+    "Nessa Corrigall, Skarra View",
     "034",
     "2027-01-22",
     60,

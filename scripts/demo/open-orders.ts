@@ -39,6 +39,10 @@ const BUILDS: [string, number, string][] = [
   ["TF-110", 2, "2026-11-27"],
 ];
 
+/** Above every number of the past year. */
+const FIRST_PURCHASE = 901;
+const FIRST_BUILD = 851;
+
 /** Open purchase orders, one supplier each, and open builds. */
 export function openOrders(book: Book, suppliers: readonly Supplier[]): Supply[] {
   const bySupplier = new Map<string, Omit<Supply, "reference">[]>();
@@ -53,13 +57,16 @@ export function openOrders(book: Book, suppliers: readonly Supplier[]): Supply[]
   const numbered = orders
     .sort((a, b) => (a[0].due < b[0].due ? -1 : a[0].due > b[0].due ? 1 : 0))
     .flatMap((lines, index) =>
-      lines.map((line) => ({ ...line, reference: `PO-26${411 + index * 2 + (index % 3)}` })),
+      lines.map((line) => ({
+        ...line,
+        reference: `PO-26-${String(FIRST_PURCHASE + index * 3 + (index % 2)).padStart(4, "0")}`,
+      })),
     );
   const builds = BUILDS.map(([partNumber, quantity, due], index) => ({
     partNumber,
     quantity,
     due,
-    reference: `SO-26${318 + index * 3}`,
+    reference: `SO-26-${String(FIRST_BUILD + index * 3).padStart(4, "0")}`,
   }));
   return [...numbered, ...builds];
 }

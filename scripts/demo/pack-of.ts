@@ -61,6 +61,8 @@ export function packOf(part: BookPart): Pack {
   if (part.unit === "LTR") return { unit: "XCI", per: 20, multiple: 1 };
   if (part.unit === "MTQ") return { unit: "MTQ", per: 1, multiple: 0.5 };
   if (trade === "fast" && (part.cost ?? 0) < 1) return { unit: "XBX", per: boxOf(part), multiple: 1 };
+  if ((trade === "trim" || trade === "hardware" || trade === "webb") && (part.cost ?? 0) < 0.5)
+    return { unit: "XPK", per: 250, multiple: 1 };
   if (PIECES[trade] && (part.cost ?? 0) < 2) return packed(PIECES[trade]);
   return { unit: "EA", per: 1, multiple: 1 };
 }

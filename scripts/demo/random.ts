@@ -27,6 +27,6 @@ export function seededRandom(name: string): Random {
 
 function hash(text: string): number {
   let value = 0x811c9dc5;
-  for (const character of text) value = Math.imul(value ^ character.codePointAt(0)!, 0x01000193) >>> 0;
+  for (const character of text) value = Math.imul(value ^ (character.codePointAt(0) ?? 0), 0x01000193) >>> 0;
   return value;
 }

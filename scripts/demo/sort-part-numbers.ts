@@ -13,7 +13,7 @@ export function sortPartNumbers(book: Book): string[] {
   const sorted = [...book.parts.keys()].filter((part) => !waiting.has(part));
   for (let index = 0; index < sorted.length; index++) {
     for (const line of lines.get(sorted[index]) ?? []) {
-      const left = waiting.get(line.component)! - 1;
+      const left = (waiting.get(line.component) ?? 0) - 1;
       waiting.set(line.component, left);
       if (left === 0) sorted.push(line.component);
     }

@@ -34,5 +34,5 @@ export const stoppers: readonly Stopper[] = [
   { partNumber: "SK-0022", reason: "expired-lot", stopsAt: 10, nearly: 0.3, depth: 4 },
   { partNumber: "CB-0013", reason: "overdue-order", stopsAt: 10, nearly: 0.4, depth: 3 },
   { partNumber: "FU-1013", reason: "drawn-down-by-s4", stopsAt: 10, nearly: 0, depth: 2 },
-  { partNumber: "FK-2X16-A2", reason: "plain-shortage", stopsAt: 10, nearly: 0.7, depth: 4 },
+  { partNumber: "FK-2X16-A2", reason: "plain-shortage", stopsAt: 10, nearly: 0.7, depth: 3 },
 ];

@@ -30,6 +30,9 @@ export interface Offer {
   preferred: boolean;
 }
 
+/** Rough rates, only to make believable prices of. */
+const PER_EURO: Record<string, number> = { EUR: 1, DKK: 7.46, USD: 1.09 };
+
 export function readSuppliers(): Supplier[] {
   const text = readFileSync(new URL("./book/suppliers.txt", import.meta.url), "utf8");
   return text
@@ -55,7 +58,9 @@ export function makeOffers(book: Book, suppliers: readonly Supplier[]): Offer[] 
   for (const part of book.parts.values()) {
     if (part.sourcing !== "buy") continue;
     const first = preferredSupplier(part, suppliers);
-    const second = suppliers.find((supplier) => supplier !== first && supplier.trades.includes(part.trade!));
+    const second = suppliers.find(
+      (supplier) => supplier !== first && supplier.trades.includes(part.trade ?? ""),
+    );
     offers.push(...offerFrom(part, first, 1, true));
     const chances = seededRandom(`${part.partNumber}/second`);
     if (second && chances.chance(0.35))
@@ -100,7 +105,7 @@ function offerFrom(part: BookPart, supplier: Supplier, dearer: number, preferred
     minimum: String(roundUp(minimum, multiple)),
     multiple: String(multiple),
     fromQuantity: String(from),
-    unitPrice: (price * factor).toFixed(price < 1 ? 3 : 2),
+    unitPrice: (price * factor * PER_EURO[supplier.currency]).toFixed(price < 1 ? 3 : 2),
     currency: supplier.currency,
     leadTimeDays: lead,
     preferred,
