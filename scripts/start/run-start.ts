@@ -29,7 +29,8 @@ export async function runStart({ dev }: { dev: boolean }): Promise<number> {
     await assertPortFree(env.host, env.port);
     const { addresses, empty } = await openDatabase(local, stop);
     await prepareSchema({ addresses, local, demo: env.demo, empty });
-    const address = env.publicUrl ?? localAddress(env);
+    const listening = `http://${env.host.includes(":") ? `[${env.host}]` : env.host}:${env.port}`;
+    const address = env.publicUrl ?? listening;
     const settings = {
       ...addresses,
       COTTERPIN_LOCAL: local,
@@ -37,7 +38,7 @@ export async function runStart({ dev }: { dev: boolean }): Promise<number> {
     };
     const whenReady = async () => {
       lock.note(address);
-      await sayWelcome(address, env.demo, settings);
+      await sayWelcome({ address, local: listening, demo: env.demo, env: settings });
     };
     await serve({ build: dev ? undefined : await buildApplication(), env, settings, stop, whenReady });
   });
@@ -49,8 +50,4 @@ function readSettings(): Env {
   } catch (error) {
     throw new StopSentence(error instanceof Error ? error.message : String(error));
   }
-}
-
-function localAddress({ host, port }: Env): string {
-  return `http://${host.includes(":") ? `[${host}]` : host}:${port}`;
 }

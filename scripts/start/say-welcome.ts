@@ -11,9 +11,18 @@ const demoPeople = [
 ];
 const demoPassword = "saltmarsh-demo-2026";
 
+interface Welcome {
+  /** Where people find it. */
+  address: string;
+  /** Where it listens; the same unless a proxy stands before it. */
+  local: string;
+  demo: boolean;
+  env: NodeJS.ProcessEnv;
+}
+
 /** Says where the application is and who may sign in, or the code for the first visitor. */
-export async function sayWelcome(address: string, demo: boolean, env: NodeJS.ProcessEnv): Promise<void> {
-  const lines = ["", `Cotterpin is at ${address}`, ""];
+export async function sayWelcome({ address, local, demo, env }: Welcome): Promise<void> {
+  const lines = ["", `Cotterpin is at ${address}${address === local ? "" : `, and listens at ${local}`}`, ""];
   if (demo) lines.push(...demoLines());
   else lines.push(...(await setUpLines(address, env)));
   console.log([...lines, "Ctrl-C stops it.", ""].join("\n"));
