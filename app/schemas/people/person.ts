@@ -3,7 +3,7 @@ import { newPasswordSchema } from "./new-password";
 import { roleSchema } from "./role";
 import { emailSchema } from "./sign-in";
 
-export const nameSchema = z
+const nameSchema = z
   .string({ error: "Write a name." })
   .trim()
   .min(1, "Write a name.")

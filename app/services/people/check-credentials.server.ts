@@ -1,6 +1,6 @@
+import { Person } from "~/db/models/people/person";
 import { AppError } from "~/utils/errors";
 import { countAttempt, forgiveAttempt } from "./count-attempt.server";
-import { select } from "./run-sql.server";
 import { verifyPassword } from "./verify-password.server";
 
 interface Credentials {
@@ -17,11 +17,9 @@ interface Credentials {
  */
 export async function checkCredentials({ email, password, address }: Credentials): Promise<number> {
   const attempt = await countAttempt({ account: email, address });
-  const [person] = await select<{ id: number; hash: string }>(
-    "SELECT id, password_hash AS hash FROM person WHERE email = :email AND disabled_at IS NULL",
-    { email },
-  );
-  if (!(await verifyPassword(password, person?.hash))) {
+  const person = await Person.findOne({ where: { email, disabledAt: null } });
+  const fits = await verifyPassword(password, person?.passwordHash);
+  if (!person || !fits) {
     throw new AppError(
       "invalid",
       "This e-mail address and password do not go together. Try again, or ask a manager for a new password.",

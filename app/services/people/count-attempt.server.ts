@@ -1,5 +1,7 @@
+import { Op } from "sequelize";
+import { SignInAttempt } from "~/db/models/people/sign-in-attempt";
 import { AppError } from "~/utils/errors";
-import { insert, run, select } from "./run-sql.server";
+import { select } from "./run-sql.server";
 import { hashSecret } from "./secret.server";
 
 const MINUTES = 15;
@@ -21,10 +23,7 @@ interface Try {
  */
 export async function countAttempt({ account, address }: Try): Promise<number> {
   const accountKey = hashSecret(account);
-  const attempt = await insert(
-    "INSERT INTO sign_in_attempt (account_key, address, succeeded) VALUES (:accountKey, :address, FALSE)",
-    { accountKey, address },
-  );
+  const attempt = await SignInAttempt.create({ accountKey, address, succeeded: false });
   const [row] = await select<{
     ofAccount: number;
     fromAddress: number;
@@ -40,8 +39,8 @@ export async function countAttempt({ account, address }: Try): Promise<number> {
     { accountKey, address },
   );
   const accountFull = Number(row.ofAccount) > MOST_FOR_ACCOUNT;
-  if (!accountFull && Number(row.fromAddress) <= MOST_FROM_ADDRESS) return attempt;
-  await run("DELETE FROM sign_in_attempt WHERE id = :id", { id: attempt });
+  if (!accountFull && Number(row.fromAddress) <= MOST_FROM_ADDRESS) return attempt.id;
+  await attempt.destroy();
   const seconds = Math.max(1, Number(accountFull ? row.waitAccount : row.waitAddress) + 1);
   const minutes = Math.ceil(seconds / 60);
   throw new AppError(
@@ -53,6 +52,7 @@ export async function countAttempt({ account, address }: Try): Promise<number> {
 
 /** Marks a try as a success, and clears away what is too old to count. */
 export async function forgiveAttempt(id: number): Promise<void> {
-  await run("UPDATE sign_in_attempt SET succeeded = TRUE WHERE id = :id", { id });
-  await run("DELETE FROM sign_in_attempt WHERE at < NOW(3) - INTERVAL 1 DAY LIMIT 1000");
+  await SignInAttempt.update({ succeeded: true }, { where: { id } });
+  const yesterday = new Date(Date.now() - 24 * 60 * 60 * 1000);
+  await SignInAttempt.destroy({ where: { at: { [Op.lt]: yesterday } }, limit: 1000 });
 }

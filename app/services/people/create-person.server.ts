@@ -1,11 +1,13 @@
 import { type Transaction, UniqueConstraintError } from "sequelize";
 import { inTransaction } from "~/db/in-transaction.server";
+import { Person } from "~/db/models/people/person";
+import { PersonRole } from "~/db/models/people/person-role";
+import { AuditEvent } from "~/db/models/system/audit-event";
 import { newPersonSchema } from "~/schemas/people/person";
 import type { Role } from "~/schemas/people/role";
 import { AppError } from "~/utils/errors";
 import { parseInput } from "~/utils/request-body";
 import { hashPassword } from "./hash-password.server";
-import { insert } from "./run-sql.server";
 
 interface NewPerson {
   name: string;
@@ -51,18 +53,11 @@ async function insertPerson(
 ) {
   const { name, email } = person;
   const roles = [...new Set(person.roles)];
-  const id = await insert(
-    "INSERT INTO person (name, email, password_hash) VALUES (:name, :email, :passwordHash)",
-    { name, email, passwordHash },
-    transaction,
-  );
-  for (const role of roles) {
-    await insert("INSERT INTO person_role (person_id, role) VALUES (:id, :role)", { id, role }, transaction);
-  }
-  await insert(
-    "INSERT INTO audit_event (actor_id, act, subject, `after`) VALUES (:actorId, 'people', :subject, :after)",
-    { actorId, subject: `person ${id}`, after: JSON.stringify({ name, email, roles }) },
-    transaction,
+  const { id } = await Person.create({ name, email, passwordHash }, { transaction });
+  for (const role of roles) await PersonRole.create({ personId: id, role }, { transaction });
+  await AuditEvent.create(
+    { actorId, act: "people", subject: `person ${id}`, after: { name, email, roles } },
+    { transaction },
   );
   return id;
 }

@@ -1,5 +1,5 @@
+import { ApiToken } from "~/db/models/people/api-token";
 import type { Role } from "~/schemas/people/role";
-import { insert } from "./run-sql.server";
 import { hashSecret, newSecret } from "./secret.server";
 
 /**
@@ -8,10 +8,6 @@ import { hashSecret, newSecret } from "./secret.server";
  */
 export async function createToken({ role, name }: { role: Role; name: string }): Promise<string> {
   const token = newSecret();
-  await insert("INSERT INTO api_token (token_hash, role, name) VALUES (:hash, :role, :name)", {
-    hash: hashSecret(token),
-    role,
-    name,
-  });
+  await ApiToken.create({ tokenHash: hashSecret(token), role, name });
   return token;
 }

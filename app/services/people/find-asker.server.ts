@@ -1,7 +1,8 @@
+import { Session } from "~/db/models/people/session";
 import type { Role } from "~/schemas/people/role";
 import { readSessionId } from "~/utils/session-cookie";
 import type { CurrentPerson } from "./current-person";
-import { run, select } from "./run-sql.server";
+import { select } from "./run-sql.server";
 import { hashSecret } from "./secret.server";
 
 interface AskerRow {
@@ -54,7 +55,7 @@ async function findBySession(id: string): Promise<CurrentPerson | null> {
         AND session.seen_at > NOW(3) - INTERVAL 12 HOUR AND person.disabled_at IS NULL`,
     { hash },
   );
-  if (rows[0]?.stale) await run("UPDATE session SET seen_at = NOW(3) WHERE id_hash = :hash", { hash });
+  if (rows[0]?.stale) await Session.update({ seenAt: new Date() }, { where: { idHash: hash } });
   return present(rows, "session");
 }
 

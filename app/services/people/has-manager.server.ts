@@ -1,8 +1,7 @@
 import type { Transaction } from "sequelize";
-import { select } from "./run-sql.server";
+import { PersonRole } from "~/db/models/people/person-role";
 
 /** Whether anybody could manage the shop; without one, the first visitor sets it up. */
 export async function hasManager(transaction?: Transaction): Promise<boolean> {
-  const rows = await select("SELECT 1 FROM person_role WHERE role = 'manager' LIMIT 1", {}, transaction);
-  return rows.length > 0;
+  return (await PersonRole.findOne({ where: { role: "manager" }, transaction })) !== null;
 }

@@ -1,11 +1,13 @@
 import { randomInt } from "node:crypto";
 import { inTransaction } from "~/db/in-transaction.server";
+import { SetupCode } from "~/db/models/people/setup-code";
 import { hasManager } from "./has-manager.server";
 import { hashSetupCode } from "./hash-setup-code.server";
-import { insert, run } from "./run-sql.server";
 
 /** Without letters and digits that look alike. */
 const ALPHABET = "ABCDEFGHJKMNPQRSTUVWXYZ23456789";
+
+const SEVEN_DAYS = 7 * 24 * 60 * 60 * 1000;
 
 /**
  * Makes the one-time code by which the first visitor becomes the manager; a code made before is worth nothing then.
@@ -16,12 +18,9 @@ export async function makeSetupCode(): Promise<string | null> {
     if (await hasManager(transaction)) return null;
     const letters = Array.from({ length: 16 }, () => ALPHABET[randomInt(ALPHABET.length)]).join("");
     const code = (letters.match(/.{4}/g) ?? []).join("-");
-    await run("DELETE FROM setup_code WHERE used_at IS NULL", {}, transaction);
-    await insert(
-      "INSERT INTO setup_code (code_hash, expires_at) VALUES (:hash, NOW(3) + INTERVAL 7 DAY)",
-      { hash: hashSetupCode(code) },
-      transaction,
-    );
+    await SetupCode.destroy({ where: { usedAt: null }, transaction });
+    const expiresAt = new Date(Date.now() + SEVEN_DAYS);
+    await SetupCode.create({ codeHash: hashSetupCode(code), expiresAt }, { transaction });
     return code;
   });
 }

@@ -1,4 +1,6 @@
+import { Op } from "sequelize";
 import { inTransaction } from "~/db/in-transaction.server";
+import { SetupCode } from "~/db/models/people/setup-code";
 import { setUpSchema } from "~/schemas/people/person";
 import { AppError } from "~/utils/errors";
 import { parseInput } from "~/utils/request-body";
@@ -6,7 +8,6 @@ import { countAttempt, forgiveAttempt } from "./count-attempt.server";
 import { createPerson } from "./create-person.server";
 import { hasManager } from "./has-manager.server";
 import { hashSetupCode } from "./hash-setup-code.server";
-import { run } from "./run-sql.server";
 
 /**
  * Makes the first visitor the manager, by the one-time code that the start command printed.
@@ -20,10 +21,10 @@ export async function setUpManager(input: unknown, address: string): Promise<num
   const attempt = await countAttempt({ account: "set-up code", address });
   const id = await inTransaction(async (transaction) => {
     // The update locks the code's row, so of two who use it at once only one goes on.
-    const used = await run(
-      "UPDATE setup_code SET used_at = NOW(3) WHERE code_hash = :hash AND used_at IS NULL AND expires_at > NOW(3)",
-      { hash: hashSetupCode(code) },
-      transaction,
+    const now = new Date();
+    const [used] = await SetupCode.update(
+      { usedAt: now },
+      { where: { codeHash: hashSetupCode(code), usedAt: null, expiresAt: { [Op.gt]: now } }, transaction },
     );
     if (used !== 1) throw wrongCode();
     if (await hasManager(transaction)) throw alreadySetUp();

@@ -1,6 +1,9 @@
+import { Op } from "sequelize";
 import { inTransaction } from "~/db/in-transaction.server";
-import { insert, run } from "./run-sql.server";
+import { Session } from "~/db/models/people/session";
 import { hashSecret, newSecret } from "./secret.server";
+
+const SEVEN_DAYS = 7 * 24 * 60 * 60 * 1000;
 
 /**
  * Begins a session under a new id and ends the one the browser had, so that an id planted before never counts.
@@ -8,17 +11,12 @@ import { hashSecret, newSecret } from "./secret.server";
  */
 export async function startSession(personId: number, oldId: string | null): Promise<string> {
   const id = newSecret();
+  const now = Date.now();
   await inTransaction(async (transaction) => {
-    await run(
-      "DELETE FROM session WHERE id_hash = :old OR expires_at < NOW(3)",
-      { old: hashSecret(oldId ?? "") },
-      transaction,
-    );
-    await insert(
-      "INSERT INTO session (id_hash, person_id, expires_at) VALUES (:hash, :personId, NOW(3) + INTERVAL 7 DAY)",
-      { hash: hashSecret(id), personId },
-      transaction,
-    );
+    const ended = [{ idHash: hashSecret(oldId ?? "") }, { expiresAt: { [Op.lt]: new Date(now) } }];
+    await Session.destroy({ where: { [Op.or]: ended }, transaction });
+    const expiresAt = new Date(now + SEVEN_DAYS);
+    await Session.create({ idHash: hashSecret(id), personId, expiresAt }, { transaction });
   });
   return id;
 }

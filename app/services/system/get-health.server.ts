@@ -1,6 +1,7 @@
 import { QueryTypes } from "sequelize";
 import { sequelize } from "~/db/client.server";
 import { ALL_MIGRATIONS } from "~/db/migrations/all-migrations";
+import { Revision } from "~/db/models/system/revision";
 
 declare global {
   /** Set by the server when it has been told to stop: it finishes what it has and takes nothing new. */
@@ -29,13 +30,8 @@ export async function getHealth(): Promise<Health> {
 }
 
 async function sumRevisions(): Promise<number> {
-  const [row] = await sequelize.query<{ sum: string }>(
-    "SELECT CAST(SUM(value) AS CHAR) AS sum FROM revision",
-    {
-      type: QueryTypes.SELECT,
-    },
-  );
-  return Number(row.sum);
+  const revisions = await Revision.findAll();
+  return revisions.reduce((sum, { value }) => sum + value, 0);
 }
 
 async function appliedMigrations(): Promise<string[]> {
