@@ -5,7 +5,7 @@ import { answerWords } from "./answer-words";
 export function AnswerSentence({ page }: { page: CheckPageAnswer }) {
   return (
     <p
-      aria-live="polite"
+      role="status"
       className="mt-3 min-h-[1.4em] max-w-[62rem] text-pretty text-xl leading-snug sm:text-[1.75rem]"
     >
       {page.problem ??

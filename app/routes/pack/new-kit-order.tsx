@@ -20,12 +20,16 @@ export const loader = guardedLoader("kit-orders", async () => {
     serial: "",
     wantedOn: "",
     customer: "",
-    // A new order goes to the end of the queue unless somebody says otherwise.
-    priority: String(Math.min((open.at(-1)?.priority ?? 0) + 1, 9999)),
+    priority: String(lastPlace(open.at(-1)?.priority ?? 0)),
     note: "",
   };
   return { kits, draft };
 });
+
+/** A new order goes to the end of the queue, in steps of ten that leave room between, unless somebody says otherwise. */
+function lastPlace(highest: number): number {
+  return Math.min(Math.floor(highest / 10) * 10 + 10, 9999);
+}
 
 export const action = guardedAction("kit-orders", async ({ request }: Route.ActionArgs, person) => {
   const draft = draftFromForm(await request.formData());
