@@ -10,7 +10,9 @@ import { sayWhyItStops } from "./stop-sentence.mjs";
  * @param {{ debian: ("mariadb-server" | "chromium")[], main: () => Promise<number> }} options main gives the exit code
  */
 export async function withSetUp({ debian, main }) {
+  let stopping = false;
   const stop = async () => {
+    stopping = true;
     await endCommands();
     process.exit(143);
   };
@@ -25,7 +27,8 @@ export async function withSetUp({ debian, main }) {
     process.off("SIGTERM", stop).off("SIGINT", stop);
     process.exitCode = await main();
   } catch (error) {
-    sayWhyItStops(error);
+    // What goes wrong because it is being stopped is no news.
+    if (!stopping) sayWhyItStops(error);
     process.exitCode = 1;
   }
 }
