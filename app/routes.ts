@@ -25,6 +25,7 @@ export default [
   route("api/parts/:partNumber", "routes/api/part.ts"),
   route("api/structure/:partNumber", "routes/api/structure.ts"),
   route("api/where-used/:partNumber", "routes/api/where-used.ts"),
+  route("api/imports/:kind", "routes/api/imports.ts"),
   route("api/health", "routes/api/health.ts"),
 
   route("*", "routes/not-found.tsx"),

@@ -1,4 +1,5 @@
 import { z } from "zod";
+import { plainDecimal } from "./quantity";
 
 const plain = /^\d+(\.\d+)?$/;
 const longestFraction = 32;
@@ -6,7 +7,8 @@ const longestFraction = 32;
 function fraction(expected: string, accepts: (text: string) => boolean) {
   return z.string().transform((text, ctx) => {
     const trimmed = text.trim();
-    if (trimmed.length <= longestFraction && plain.test(trimmed) && accepts(trimmed)) return trimmed;
+    if (trimmed.length <= longestFraction && plain.test(trimmed) && accepts(trimmed))
+      return plainDecimal(trimmed);
     ctx.addIssue({ code: "custom", message: expected, input: text });
     return z.NEVER;
   });

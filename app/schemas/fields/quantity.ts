@@ -24,11 +24,19 @@ export function quantityFault(text: string): string | null {
   return `a quantity in plain digits, ${example}`;
 }
 
+/** The same decimal without the zeros that say nothing: `007.50` is `7.5`. */
+export function plainDecimal(text: string): string {
+  const [whole, fraction = ""] = text.split(".");
+  const kept = fraction.replace(/0+$/, "");
+  const digits = whole.replace(/^0+(?=\d)/, "");
+  return kept === "" ? digits : `${digits}.${kept}`;
+}
+
 /** A quantity as plain decimal digits: `"12"`, `"0.350"`. No sign, exponent, word or separator. */
 export const quantity = z.string().transform((text, ctx) => {
   const trimmed = text.trim();
   const message = quantityFault(trimmed);
-  if (message === null) return trimmed;
+  if (message === null) return plainDecimal(trimmed);
   ctx.addIssue({ code: "custom", message, input: text });
   return z.NEVER;
 });

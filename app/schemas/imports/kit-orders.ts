@@ -9,14 +9,17 @@ import type { ImportKind } from "./import-kind";
 
 const row = z
   .object({
-    number: code("a kit order number"),
+    number: code("a kit order number", 60).refine(
+      (number) => /^[\p{L}\p{N}][\p{L}\p{N}._-]*$/u.test(number),
+      "letters, digits, points, dashes and underscores, such as KO-0042",
+    ),
     kit: partNumber,
-    customer: text(255),
-    serial: emptyAs(code("a serial"), null),
+    customer: text(190),
+    serial: emptyAs(code("a serial", 60), null),
     wanted_on: emptyAs(isoDate, null),
-    priority: emptyAs(wholeNumber(0, 1_000_000), 100),
+    priority: emptyAs(wholeNumber(1, 9_999), 100),
     options: optionCodes,
-    note: text(2_000),
+    note: text(1_000),
   })
   .transform((cells) => ({
     number: cells.number,

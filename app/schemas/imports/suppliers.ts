@@ -9,7 +9,13 @@ const row = z
   .object({
     supplier: code("a supplier code"),
     name: text(255),
-    email: emptyAs(z.string().trim().pipe(z.email("a mail address such as orders@firm.example")), ""),
+    email: emptyAs(
+      z
+        .string()
+        .trim()
+        .pipe(z.email("a mail address such as orders@firm.example").max(190, "at most 190 characters")),
+      "",
+    ),
     phone: text(64),
     currency: emptyAs(currency, "EUR"),
     lead_time_days: emptyAs(wholeNumber(0, 36_500), null),

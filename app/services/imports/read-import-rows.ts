@@ -18,7 +18,15 @@ export interface RefusedRow {
 }
 
 export type ImportRows<Row> =
-  | { ok: true; rows: ImportRow<Row>[]; refused: RefusedRow[]; encoding: string; delimiter: string }
+  | {
+      ok: true;
+      rows: ImportRow<Row>[];
+      refused: RefusedRow[];
+      /** The columns that the file has. */
+      names: string[];
+      encoding: string;
+      delimiter: string;
+    }
   /** The file as a whole cannot be read. */
   | { ok: false; problems: CsvProblem[] };
 
@@ -54,5 +62,5 @@ export function readImportRows<Row>(bytes: Uint8Array, kind: ImportKind<Row>): I
       refused.push({ line: row.line, problems });
     }
   }
-  return { ok: true, rows, refused, encoding: table.encoding, delimiter: table.delimiter };
+  return { ok: true, rows, refused, names, encoding: table.encoding, delimiter: table.delimiter };
 }

@@ -1,0 +1,27 @@
+import type { ImportKindName } from "~/schemas/imports/import-kind-name";
+import { importBins } from "./import-bins.server";
+import { importKitOrders } from "./import-kit-orders.server";
+import { importOffers } from "./import-offers.server";
+import { importParts } from "./import-parts.server";
+import { importStock } from "./import-stock.server";
+import { importStructure } from "./import-structure.server";
+import { importSuppliers } from "./import-suppliers.server";
+import { importSupply } from "./import-supply.server";
+import type { ImportAnswer } from "./present-import";
+import type { ImportRequest } from "./run-import.server";
+
+const imports: Record<ImportKindName, (request: ImportRequest) => Promise<ImportAnswer>> = {
+  suppliers: importSuppliers,
+  bins: importBins,
+  parts: importParts,
+  structure: importStructure,
+  offers: importOffers,
+  stock: importStock,
+  supply: importSupply,
+  "kit-orders": importKitOrders,
+};
+
+/** Imports a file of any kind. Throws as `runImport` does. */
+export function importFile(kind: ImportKindName, request: ImportRequest): Promise<ImportAnswer> {
+  return imports[kind](request);
+}

@@ -1,0 +1,77 @@
+import { createHash } from "node:crypto";
+import type { Transaction } from "sequelize";
+import { inTransaction } from "~/db/in-transaction.server";
+import { appendAuditEvent } from "~/services/audit/append-audit-event.server";
+import { assertMay } from "~/services/people/assert-may.server";
+import type { CurrentPerson } from "~/services/people/current-person";
+import { readRows } from "~/db/read-rows.server";
+import { raiseRevision } from "~/services/revision/raise-revision.server";
+import type { RevisionName } from "~/services/revision/revision-name";
+import type { CsvProblem } from "~/utils/csv/csv-problem";
+import { AppError, type FieldError } from "~/utils/errors";
+import type { ImportJob } from "./import-job";
+import { type ImportAnswer, presentProblem, presentRows } from "./present-import";
+import { readImportRows } from "./read-import-rows";
+
+export interface ImportRequest {
+  bytes: Uint8Array;
+  person: CurrentPerson;
+  /** Only says what would change. */
+  dryRun?: boolean;
+}
+
+const mostErrors = 100;
+
+function refuseFile(problems: readonly CsvProblem[]): AppError {
+  return new AppError("invalid", "The file cannot be read; nothing was changed.", {
+    errors: problems.map(presentProblem),
+  });
+}
+
+function refuseRows(errors: readonly FieldError[], refused: number): AppError {
+  const rows = refused === 1 ? "One row is" : `${refused} rows are`;
+  return new AppError("invalid", `${rows} refused; nothing was changed. Mend the file and send it again.`, {
+    errors: errors.slice(0, mostErrors),
+  });
+}
+
+/** Whoever changes the same things waits here, so that what was planned is still so when it is written. */
+async function lockRevisions(names: readonly RevisionName[], transaction: Transaction): Promise<void> {
+  for (const name of names) {
+    await readRows("SELECT value FROM revision WHERE name = :name FOR UPDATE", { name }, transaction);
+  }
+}
+
+/**
+ * Imports a CSV file of one kind, all or nothing, or says what it would do. The same file again changes nothing.
+ * @throws AppError "forbidden"; "invalid" with errors by line and column where the file or, unless it is a dry run,
+ * one of its rows is refused; "busy"
+ */
+export async function runImport<Row>(job: ImportJob<Row>, request: ImportRequest): Promise<ImportAnswer> {
+  const { bytes, dryRun = false } = request;
+  const person = assertMay(request.person, job.act);
+  const read = readImportRows(bytes, job.kind);
+  if (!read.ok) throw refuseFile(read.problems);
+  const fileHash = createHash("sha256").update(bytes).digest("hex");
+  return inTransaction(async (transaction) => {
+    if (!dryRun) await lockRevisions(job.revisions, transaction);
+    const plan = await job.plan(read.rows, { transaction, person, columns: new Set(read.names), fileHash });
+    const { encoding, delimiter } = read;
+    const answer = { kind: job.name, dryRun, encoding, delimiter, ...presentRows(plan, read.refused) };
+    if (dryRun) return answer;
+    if (answer.counts.refused > 0) {
+      throw refuseRows(
+        answer.rows.flatMap((row) => row.errors),
+        answer.counts.refused,
+      );
+    }
+    if (!plan.changes) return answer;
+    await plan.write();
+    await appendAuditEvent(
+      { actorId: person.id, act: job.act, subject: `file ${fileHash.slice(0, 16)}`, after: answer.counts },
+      transaction,
+    );
+    for (const name of job.revisions) await raiseRevision(name, transaction);
+    return answer;
+  });
+}
