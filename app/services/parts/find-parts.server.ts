@@ -1,6 +1,6 @@
+import { readRows } from "~/db/read-rows.server";
 import type { CurrentPerson } from "~/services/people/current-person";
 import { mayDo } from "~/services/people/permissions";
-import { readRows } from "~/services/planning/read-rows.server";
 import { PART_COLUMNS, type PartRow, type PresentedPart, presentPart } from "./present-part";
 
 interface PartsQuery {

@@ -1,7 +1,7 @@
+import { readRows } from "~/db/read-rows.server";
 import { partKey } from "~/domain/planning/part-key";
 import type { CurrentPerson } from "~/services/people/current-person";
 import { mayDo } from "~/services/people/permissions";
-import { readRows } from "~/services/planning/read-rows.server";
 import { AppError } from "~/utils/errors";
 import { formatDecimals } from "~/utils/format/format-decimals";
 import { getWhereUsed, type WhereUsedLine } from "./get-where-used.server";

@@ -9,11 +9,12 @@ import type { OpenKitOrder } from "./load-kit-orders.server";
 import { loadKitOrders } from "./load-kit-orders.server";
 import type { BookStructure } from "./load-structure.server";
 import { loadStructure } from "./load-structure.server";
-import { loadSupplies } from "./load-supplies.server";
+import { loadSupplies, type SupplyRows } from "./load-supplies.server";
 
 /** Everything a plan needs, of one moment. Shared between requests: never changed. */
 export interface PlanBook extends BookStructure {
   supplies: Supplies;
+  rows: SupplyRows;
   kitOrders: OpenKitOrder[];
   /** Grows with every change of structure, stock or orders. */
   revision: number;
@@ -53,10 +54,10 @@ async function loadBook(day: IsoDate): Promise<PlanBook> {
     const base =
       last?.revisions.structure === revisions.structure ? last.book : await loadStructure(transaction);
     const { structure, parts, numberOfId, options } = base;
-    const supplies = await loadSupplies(structure, day, transaction);
+    const { supplies, rows } = await loadSupplies(structure, day, transaction);
     const kitOrders = await loadKitOrders(transaction);
     const revision = revisions.structure + revisions.stock + revisions.orders;
-    const book = { structure, parts, numberOfId, options, supplies, kitOrders, revision, day };
+    const book = { structure, parts, numberOfId, options, supplies, rows, kitOrders, revision, day };
     kept = { book, revisions };
     return book;
   });

@@ -1,11 +1,11 @@
+import { readRows } from "~/db/read-rows.server";
 import { presentShipCheck } from "~/domain/planning/answer/present-ship-check";
-import type { PlanDemand, ShipCheck } from "~/domain/planning/types";
+import type { ShipCheck } from "~/domain/planning/types";
 import type { ShipLineAnswer } from "~/schemas/planning/ship-line";
-import type { PlanBook } from "./get-plan-book.server";
 import { getPlanBook } from "./get-plan-book.server";
 import type { OpenKitOrder } from "./load-kit-orders.server";
+import { openOrderDemands } from "./open-order-demands";
 import { planDemand } from "./plan-demand.server";
-import { readRows } from "./read-rows.server";
 
 const KITS_SHOWN = 10;
 
@@ -14,13 +14,8 @@ export async function getShipLine(): Promise<ShipLineAnswer> {
   const book = await getPlanBook();
   const orders = book.kitOrders.slice(0, await kitsShown());
   if (orders.length === 0) return { ready: 0, of: 0, next: null, allBy: null, revision: book.revision };
-  const answer = presentShipCheck(
-    planDemand(
-      book,
-      orders.map((order) => demandOf(order, book)),
-      "strict",
-    ),
-  );
+  const demands = openOrderDemands(book, orders.length);
+  const answer = presentShipCheck(planDemand(book, demands, "strict"));
   const waiting = answer.demand.findIndex((one) => one.buildable === 0);
   return {
     ready: answer.demand.filter((one) => one.buildable !== 0).length,
@@ -29,13 +24,6 @@ export async function getShipLine(): Promise<ShipLineAnswer> {
     allBy: answer.ladder[answer.ladder.length - 1].readyOn,
     revision: book.revision,
   };
-}
-
-/** A wanted date that has passed asks for the kit today. */
-function demandOf(order: OpenKitOrder, book: PlanBook): PlanDemand {
-  const { partNumber, options, serial, wantedOn } = order;
-  const due = wantedOn !== null && wantedOn >= book.day ? wantedOn : null;
-  return { partNumber, quantity: "1", due, options, serial };
 }
 
 /** The orders before the first that waits lack nothing, so all that its rung lacks is its own. */

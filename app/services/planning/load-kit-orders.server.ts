@@ -1,6 +1,6 @@
 import type { Transaction } from "sequelize";
+import { readRows } from "~/db/read-rows.server";
 import type { IsoDate } from "~/domain/planning/types";
-import { readRows } from "./read-rows.server";
 
 /** An open kit order as the plan serves it: one kit. */
 export interface OpenKitOrder {

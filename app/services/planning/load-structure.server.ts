@@ -1,9 +1,9 @@
 import type { Transaction } from "sequelize";
+import { readRows } from "~/db/read-rows.server";
 import { compileStructure } from "~/domain/planning/compile-structure";
 import type { Structure } from "~/domain/planning/structure/structure";
 import type { PlanLine, PlanPart } from "~/domain/planning/types";
 import { trimDecimal } from "~/utils/format/trim-decimal";
-import { readRows } from "./read-rows.server";
 
 /** A part as the pages name it; `offered` is the supplier to order it from first. */
 export interface BookPart extends PlanPart {

@@ -1,20 +1,21 @@
 import type { Transaction } from "sequelize";
+import { readRows } from "~/db/read-rows.server";
 import type { Supplies } from "~/domain/planning/compile-supplies";
 import { compileSupplies } from "~/domain/planning/compile-supplies";
 import { splitPromised } from "~/domain/planning/split-promised";
 import type { Structure } from "~/domain/planning/structure/structure";
 import type { IsoDate, PlanStock, PlanSupply } from "~/domain/planning/types";
 import { trimDecimal } from "~/utils/format/trim-decimal";
-import { readRows } from "./read-rows.server";
 
 /** Usable stock by lot; what is held, staged or with a supplier is out of reach. */
 const STOCK = `
-  SELECT part.part_number AS partNumber, SUM(balance.quantity) AS quantity, lot.expires_on AS expiresOn
+  SELECT part.part_number AS partNumber, SUM(balance.quantity) AS quantity, lot.expires_on AS expiresOn,
+    lot.lot_code AS lot
   FROM balance
   JOIN part ON part.id = balance.part_id
   JOIN lot ON lot.id = balance.lot_id
   WHERE balance.state = 'usable'
-  GROUP BY part.id, lot.expires_on
+  GROUP BY part.id, lot.id
   HAVING SUM(balance.quantity) > 0`;
 
 /** Components of unfinished builds: promised ones still lie in their bins, picked ones do not. */
@@ -45,12 +46,18 @@ interface InWork {
   picked: string;
 }
 
+/** The rows that supplies are laid out from, for a what-if to change. */
+export interface SupplyRows {
+  stock: PlanStock[];
+  orders: PlanSupply[];
+}
+
 /** Reads stock and open orders and lays them out for planning on the given day. */
 export async function loadSupplies(
   structure: Structure,
   day: IsoDate,
   transaction: Transaction,
-): Promise<Supplies> {
+): Promise<{ supplies: Supplies; rows: SupplyRows }> {
   const stock = (await readRows<PlanStock>(STOCK, {}, transaction)).map(trimQuantity);
   const inWork = await readRows<InWork>(IN_WORK, {}, transaction);
   const orders = (await readRows<PlanSupply>(ORDERS, {}, transaction)).map(trimQuantity);
@@ -64,7 +71,8 @@ export async function loadSupplies(
     expiresOn: null,
     nowOnly: true,
   }));
-  return compileSupplies(structure, [...splitPromised(stock, promised), ...picked], orders, day);
+  const rows = { stock: [...splitPromised(stock, promised), ...picked], orders };
+  return { supplies: compileSupplies(structure, rows.stock, rows.orders, day), rows };
 }
 
 function trimQuantity<Row extends { quantity: string }>(row: Row): Row {

@@ -5,8 +5,14 @@ import { AppError, type FieldError } from "~/utils/errors";
 import type { PlanBook } from "./get-plan-book.server";
 
 /** Plans the demands over the book. Throws 404 for an unknown kit, 422 for options or serials that do not fit. */
-export function planDemand(book: PlanBook, demand: readonly PlanDemand[], sharing: Sharing): ShipPlan {
-  const result = planShip({ structure: book.structure, supplies: book.supplies, demand, sharing });
+export function planDemand(
+  book: Pick<PlanBook, "structure" | "supplies">,
+  demand: readonly PlanDemand[],
+  sharing: Sharing,
+  first: readonly PlanDemand[] = [],
+): ShipPlan {
+  const { structure, supplies } = book;
+  const result = planShip({ structure, supplies, demand, sharing, first });
   if (result.ok) return result.plan;
   const errors = result.problems.map(sayDemandProblem);
   const isMissing = result.problems.some((problem) => problem.code === "unknown-part");

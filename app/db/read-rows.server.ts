@@ -1,5 +1,5 @@
 import { QueryTypes, type Transaction } from "sequelize";
-import { sequelize } from "~/db/client.server";
+import { sequelize } from "./client.server";
 
 /** Flat rows of one SELECT with named parameters, inside the given transaction where there is one. */
 export function readRows<Row extends object>(

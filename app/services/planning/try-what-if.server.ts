@@ -1,0 +1,113 @@
+import { compileSupplies } from "~/domain/planning/compile-supplies";
+import { partKey } from "~/domain/planning/part-key";
+import type { PlanLine, StructureProblem } from "~/domain/planning/types";
+import { changeStock } from "~/domain/planning/what-if/change-stock";
+import { changeStructure } from "~/domain/planning/what-if/change-structure";
+import { changeSupply } from "~/domain/planning/what-if/change-supply";
+import type { WhatIfProblem } from "~/domain/planning/what-if/what-if";
+import type { ShipQuestion } from "~/schemas/planning/what-if";
+import { AppError, type FieldError } from "~/utils/errors";
+import type { PlanBook } from "./get-plan-book.server";
+
+type Changes = ShipQuestion["whatIf"];
+
+/** What a plan is made of. */
+export type TriedBook = Pick<PlanBook, "structure" | "supplies">;
+
+/**
+ * The book as it would be with the changes; the book itself stays as it is. Throws 422 naming each change
+ * that cannot be tried.
+ */
+export function tryWhatIf(book: PlanBook, changes: Changes): TriedBook {
+  if (Object.values(changes).every((list) => list.length === 0)) return book;
+  const compiled = changeStructure(book.structure, {
+    parts: changes.parts,
+    structure: groupByParent(changes.structure),
+  });
+  if (!compiled.ok) throw refusal(compiled.problems.map(sayStructureProblem));
+  const { structure } = compiled;
+  const stock = changeStock(structure, book.rows.stock, changes);
+  const supply = changeSupply(structure, book.rows.orders, changes.supply);
+  const problems = [stock, supply].flatMap((changed) => (changed.ok ? [] : changed.problems));
+  if (!stock.ok || !supply.ok) throw refusal(problems.map(sayProblem));
+  return { structure, supplies: compileSupplies(structure, stock.stock, supply.supply, book.day) };
+}
+
+function groupByParent(lines: readonly PlanLine[]): { parent: string; lines: PlanLine[] }[] {
+  const byParent = new Map<string, { parent: string; lines: PlanLine[] }>();
+  for (const line of lines) {
+    const key = partKey(line.parent);
+    const group = byParent.get(key) ?? { parent: line.parent, lines: [] };
+    group.lines.push(line);
+    byParent.set(key, group);
+  }
+  return [...byParent.values()];
+}
+
+function refusal(errors: FieldError[]): AppError {
+  return new AppError("invalid", errors[0].message, { errors });
+}
+
+function sayProblem(problem: WhatIfProblem): FieldError {
+  const field = `whatIf.${problem.list}.${problem.at}`;
+  switch (problem.code) {
+    case "unknown-part":
+      return {
+        field,
+        value: problem.partNumber,
+        message: `There is no part ${problem.partNumber} in the book.`,
+      };
+    case "too-many-decimals":
+      return {
+        field,
+        value: problem.quantity,
+        message: `${problem.quantity} does not fit: the part is counted with ${problem.decimals} decimals.`,
+      };
+    case "less-than-nothing":
+      return {
+        field,
+        value: problem.partNumber,
+        message: `There are only ${problem.available} of ${problem.partNumber} to take away.`,
+      };
+    case "unknown-lot":
+      return {
+        field,
+        value: problem.lot,
+        message: `No usable stock of ${problem.partNumber} is of lot ${problem.lot}.`,
+      };
+    case "unknown-reference":
+      return {
+        field,
+        value: problem.reference,
+        message: `No open order has the number ${problem.reference}.`,
+      };
+  }
+}
+
+function sayStructureProblem(problem: StructureProblem): FieldError {
+  switch (problem.code) {
+    case "loop":
+      return {
+        field: "whatIf.structure",
+        message: `The structure would run in a loop: ${problem.loop.join(" > ")}.`,
+      };
+    case "unknown-part":
+      return {
+        field: "whatIf.structure",
+        value: problem.partNumber,
+        message: `There is no part ${problem.partNumber} in the book.`,
+      };
+    case "duplicate-part":
+      return {
+        field: "whatIf.parts",
+        value: problem.partNumber,
+        message: `${problem.partNumber} stands there twice.`,
+      };
+    case "condition-not-allowed":
+      return {
+        field: "whatIf.structure",
+        value: problem.parent,
+        message: `Options and effectivity may not stand on ${problem.parent}: only on kits and phantoms used only under kits.`,
+      };
+  }
+}
