@@ -14,8 +14,8 @@ export class AuditEvent extends Model<InferAttributes<AuditEvent>, InferCreation
   declare actorId: CreationOptional<number | null>;
   declare act: string;
   declare subject: string;
-  declare before: CreationOptional<unknown>;
-  declare after: CreationOptional<unknown>;
+  declare before: CreationOptional<Record<string, unknown> | null>;
+  declare after: CreationOptional<Record<string, unknown> | null>;
 }
 
 AuditEvent.init(
