@@ -1,6 +1,5 @@
 import { describe, expect, it, vi } from "vitest";
 import { z } from "zod";
-import { createPerson } from "~/services/people/create-person.server";
 import { createToken } from "~/services/people/create-token.server";
 import {
   apiAction,
@@ -13,6 +12,7 @@ import { startSession } from "~/services/people/start-session.server";
 import { AppError } from "~/utils/errors";
 import { readJson } from "~/utils/request-body";
 import { useTestDatabase } from "../support/database";
+import { insertPerson } from "../support/people/insert-person";
 import { makeBuild, OURS, readRoutes, startApplication } from "./application";
 
 const database = useTestDatabase();
@@ -83,12 +83,7 @@ async function start() {
 }
 
 async function cookieFor(role: "clerk" | "planner"): Promise<{ Cookie: string }> {
-  const personId = await createPerson({
-    name: "Somebody",
-    email: `${role}@y.example`,
-    password: "a long sentence",
-    roles: [role],
-  });
+  const personId = await insertPerson([role], { name: "Somebody", email: `${role}@y.example` });
   return { Cookie: `cotterpin_session=${await startSession(personId, null)}` };
 }
 

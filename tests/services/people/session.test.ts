@@ -1,11 +1,11 @@
 import { describe, expect, it } from "vitest";
-import { createPerson } from "~/services/people/create-person.server";
 import { endSession } from "~/services/people/end-session.server";
 import { findAsker } from "~/services/people/find-asker.server";
 import { hashSecret } from "~/services/people/secret.server";
 import { startSession } from "~/services/people/start-session.server";
 import { readSessionId, sessionCookie } from "~/utils/session-cookie";
 import { useTestDatabase } from "../../support/database";
+import { insertPerson } from "../../support/people/insert-person";
 
 const database = useTestDatabase();
 
@@ -15,13 +15,8 @@ function withCookie(id: string): Headers {
   return new Headers({ Cookie: `theme=dark; cotterpin_session=${id}` });
 }
 
-async function makeWren(): Promise<number> {
-  return createPerson({
-    name: "Wren Adlington",
-    email: "Wren@Saltmarsh.example ",
-    password: "a sentence of wren's",
-    roles: ["clerk", "builder", "clerk"],
-  });
+function makeWren(): Promise<number> {
+  return insertPerson(["clerk", "builder"]);
 }
 
 describe("sessions", () => {

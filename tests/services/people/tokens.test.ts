@@ -1,10 +1,10 @@
 import { describe, expect, it } from "vitest";
-import { createPerson } from "~/services/people/create-person.server";
 import { createToken } from "~/services/people/create-token.server";
 import { findAsker } from "~/services/people/find-asker.server";
 import { hashSecret } from "~/services/people/secret.server";
 import { startSession } from "~/services/people/start-session.server";
 import { useTestDatabase } from "../../support/database";
+import { insertPerson } from "../../support/people/insert-person";
 
 const database = useTestDatabase();
 
@@ -14,13 +14,8 @@ function bearer(token: string, more: Record<string, string> = {}): Headers {
   return new Headers({ Authorization: `Bearer ${token}`, ...more });
 }
 
-function makeTam(roles: ("builder" | "manager" | "clerk")[]): Promise<number> {
-  return createPerson({
-    name: "Tam Sorley",
-    email: "tam@saltmarsh.example",
-    password: "a sentence of tam's",
-    roles,
-  });
+function makeTam(): Promise<number> {
+  return insertPerson(["builder"]);
 }
 
 describe("tokens", () => {
@@ -45,14 +40,14 @@ describe("tokens", () => {
   });
 
   it("put the cookie beside them out of account", async () => {
-    const id = await startSession(await makeTam(["builder"]), null);
+    const id = await startSession(await makeTam(), null);
     const cookie = { Cookie: `cotterpin_session=${id}` };
     expect(await findAsker(bearer("wrong", cookie), api)).toBeNull();
     expect(await findAsker(new Headers({ Authorization: "Basic abc", ...cookie }), api)).toBeNull();
   });
 
   it("of a person reach no further than the person does", async () => {
-    const personId = await makeTam(["builder"]);
+    const personId = await makeTam();
     const add = (token: string, role: string | null) =>
       database.query("INSERT INTO api_token (token_hash, person_id, role, name) VALUES (?, ?, ?, 'own')", [
         hashSecret(token),
