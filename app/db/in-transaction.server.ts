@@ -1,4 +1,4 @@
-import { Transaction } from "sequelize";
+import type { Transaction } from "sequelize";
 import { AppError } from "~/utils/errors";
 import { sequelize } from "./client.server";
 import { failureOf } from "./guard-transactions.server";
@@ -9,7 +9,7 @@ const MOST_MILLISECONDS = 5_000;
 const RETRY_AFTER_SECONDS = 2;
 
 /**
- * Runs `work` in one READ COMMITTED transaction and commits it. After a deadlock, a lock wait, a changed record
+ * Runs `work` in one transaction (READ COMMITTED, as every connection is set) and commits it. After a deadlock, a lock wait, a changed record
  * or a lost connection the whole of it runs again, so `work` must keep all its effects in the transaction.
  * With `transaction` given, `work` joins that one and whoever began it retries and commits.
  * @throws AppError "busy" after 8 tries or 5 seconds; whatever else `work` throws, with nothing kept.
@@ -33,9 +33,7 @@ export async function inTransaction<Result>(
 }
 
 async function tryOnce<Result>(work: (transaction: Transaction) => Promise<Result>): Promise<Result> {
-  const transaction = await sequelize.transaction({
-    isolationLevel: Transaction.ISOLATION_LEVELS.READ_COMMITTED,
-  });
+  const transaction = await sequelize.transaction();
   try {
     const result = await work(transaction);
     const swallowed = failureOf(transaction);

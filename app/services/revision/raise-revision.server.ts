@@ -1,6 +1,5 @@
 import { QueryTypes, type Transaction } from "sequelize";
 import { sequelize } from "~/db/client.server";
-import { readRevision } from "./read-revision.server";
 import type { RevisionName } from "./revision-name";
 
 /**
@@ -8,10 +7,9 @@ import type { RevisionName } from "./revision-name";
  * until the commit, so this comes last; several in the order structure, orders, stock.
  */
 export async function raiseRevision(name: RevisionName, transaction: Transaction): Promise<number> {
-  await sequelize.query("UPDATE revision SET value = value + 1 WHERE name = :name", {
-    replacements: { name },
-    type: QueryTypes.UPDATE,
-    transaction,
-  });
-  return (await readRevision([name], { transaction }))[name];
+  const [row] = await sequelize.query<{ value: number }>(
+    "INSERT INTO revision (name, value) VALUES (:name, 1) ON DUPLICATE KEY UPDATE value = value + 1 RETURNING value",
+    { replacements: { name }, type: QueryTypes.SELECT, transaction },
+  );
+  return row.value;
 }

@@ -56,7 +56,7 @@ const MOST_MOVEMENTS = 500;
  * movement by `line`, from 1) and for a key used with other content; "forbidden"; "conflict" where there is not enough
  * on hand or the first request with the key still runs; "busy"
  */
-export function postMovements(posting: PostMovements): Promise<Posted> {
+export async function postMovements(posting: PostMovements): Promise<Posted> {
   const { actor, movements, most = MOST_MOVEMENTS } = posting;
   const now = new Date();
   assertPostable(movements, most, now);
