@@ -6,6 +6,7 @@ import { StopRequest } from "../start/stop-request";
 import { runPlaywright } from "./run-playwright";
 import { runVitest } from "./run-vitest";
 import type { Tally } from "./tally";
+import { stopUnusedTestServer } from "./test-server";
 
 /**
  * Runs all tests, or with filters those files that vitest finds by them, and says the sum in the last line.
@@ -17,6 +18,7 @@ export async function runTests(filters: string[]): Promise<number> {
   const tallies: Tally[] = [];
   const stop = new StopRequest();
   stop.code = 0;
+  stop.before(() => stopUnusedTestServer());
   await stop.guard(async () => {
     tallies.push(await runVitest(path.join(reports, "vitest.json"), filters));
     if (filters.length > 0) return;

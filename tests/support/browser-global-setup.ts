@@ -5,8 +5,8 @@ import { findFreePort } from "../../scripts/database/find-free-port";
 import { localFolder } from "../../scripts/start/local-folder";
 import { runTypeScript } from "../../scripts/start/run-typescript";
 import { startWebProcess } from "../../scripts/start/web-process";
+import { joinTestServer } from "../../scripts/test/test-server";
 import { makeTestSchema } from "./make-test-schema";
-import { joinTestServer } from "./test-server";
 
 /** Serves the built application with the demo firm in a schema of its own, at the address COTTERPIN_TEST_URL. */
 export default async function setUp(): Promise<() => Promise<void>> {

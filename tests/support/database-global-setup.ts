@@ -1,7 +1,7 @@
 import type { TestProject } from "vitest/node";
 import { createSchema, type SchemaAddresses } from "../../scripts/database/create-schema";
+import { joinTestServer } from "../../scripts/test/test-server";
 import { makeTestSchema } from "./make-test-schema";
-import { joinTestServer } from "./test-server";
 
 /** What a worker is told about its schema. */
 export interface WorkerSchema extends SchemaAddresses {

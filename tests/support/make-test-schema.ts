@@ -1,6 +1,6 @@
 import { createSchema, type SchemaAddresses } from "../../scripts/database/create-schema";
 import { runTypeScript } from "../../scripts/start/run-typescript";
-import type { TestServer } from "./test-server";
+import type { TestServer } from "../../scripts/test/test-server";
 
 /** Makes a schema of this run and migrates it. */
 export async function makeTestSchema(server: TestServer, what: string): Promise<SchemaAddresses> {

@@ -1,11 +1,11 @@
-import { mkdirSync, readdirSync, readFileSync, rmSync, writeFileSync } from "node:fs";
+import { existsSync, mkdirSync, readdirSync, readFileSync, rmSync, writeFileSync } from "node:fs";
 import path from "node:path";
-import { askAsAdmin } from "../../scripts/database/ask-as-admin";
-import { identify, isAlive } from "../../scripts/database/process-identity";
-import { waitForLock } from "../../scripts/database/process-lock";
-import { type Database, startDatabase } from "../../scripts/database/start-database";
-import { stopDatabase } from "../../scripts/database/stop-database";
-import { localFolder } from "../../scripts/start/local-folder";
+import { askAsAdmin } from "../database/ask-as-admin";
+import { identify, isAlive } from "../database/process-identity";
+import { waitForLock } from "../database/process-lock";
+import { type Database, startDatabase } from "../database/start-database";
+import { stopDatabase } from "../database/stop-database";
+import { localFolder } from "../start/local-folder";
 
 const schemaPrefix = "cotterpin_test";
 
@@ -42,11 +42,18 @@ export async function joinTestServer(): Promise<TestServer> {
 }
 
 async function leave(database: Database, runs: string, folder: string): Promise<void> {
+  await dropSchemas(database, (run) => run === process.pid);
+  rmSync(path.join(runs, `${process.pid}.json`), { force: true });
+  await stopUnusedTestServer(folder);
+}
+
+/** Stops the server unless a living run needs it: a run that was killed could not. */
+export async function stopUnusedTestServer(folder = path.join(localFolder(), "test")): Promise<void> {
+  const runs = path.join(folder, "runs");
+  if (!existsSync(runs)) return;
   const lock = await waitForLock(path.join(folder, "joining.lock"));
   try {
-    await dropSchemas(database, (run) => run === process.pid);
-    rmSync(path.join(runs, `${process.pid}.json`), { force: true });
-    if (livingRuns(runs).length === 0) await stopDatabase(database.folder.folder);
+    if (livingRuns(runs).length === 0) await stopDatabase(path.join(folder, "database"));
   } finally {
     lock.release();
   }
