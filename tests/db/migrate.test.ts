@@ -2,7 +2,7 @@ import { afterAll, beforeAll, describe, expect, it } from "vitest";
 import { migrateDatabase } from "~/db/migrate.server";
 import { ALL_MIGRATIONS } from "~/db/migrations/all-migrations";
 import { createSchema, type SchemaAddresses } from "../../scripts/database/create-schema";
-import { joinTestServer, type TestServer } from "../support/test-server";
+import { joinTestServer, type TestServer } from "../../scripts/test/test-server";
 
 describe("migrateDatabase", () => {
   let server: TestServer;
