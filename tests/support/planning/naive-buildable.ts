@@ -1,20 +1,28 @@
+import type { PlanLine } from "~/domain/planning/types";
 import type { Shop } from "./factories";
-import { blocksOf, boughtParts, missingFor, type ServiceOrder } from "./service-order";
+import { countsFor, type Kits } from "./naive-netting";
+import { blocksOf, boughtParts, lacksNothing, missingFor, type ServiceOrder } from "./service-order";
 
 const LIMIT = 1_000_000n;
 
-/** Whether any bought part can be reached through lines with a quantity above 0. */
-function limited(shop: Shop, kit: string): boolean {
+/** Whether a line counts for any kit of a demand; `forever`, whether for those past any number too. */
+function everCounts(shop: Shop, line: PlanLine, demand: number, forever: boolean): boolean {
+  const many = blocksOf(shop, demand, 10n ** 12n, false);
+  return (forever ? many.slice(-1) : many).some((kits) => countsFor(line, kits, shop.today));
+}
+
+/** Whether any bought part can be reached through lines with a quantity above 0 that count. */
+function limited(shop: Shop, demand: number, forever = false): boolean {
   const bought = new Set(boughtParts(shop));
   const seen = new Set<string>();
-  const open = [kit];
+  const open = [shop.demand[demand].partNumber];
   for (let next = open.pop(); next !== undefined; next = open.pop()) {
     if (seen.has(next)) continue;
     seen.add(next);
     if (bought.has(next)) return true;
     for (const line of shop.lines) {
-      if (line.parent === next && line.quantity !== null && Number(line.quantity) > 0)
-        open.push(line.component);
+      const takes = line.parent === next && line.quantity !== null && Number(line.quantity) > 0;
+      if (takes && everCounts(shop, line, demand, forever)) open.push(line.component);
     }
   }
   return false;
@@ -51,6 +59,11 @@ function alike(shop: Shop, a: number, b: number): boolean {
   );
 }
 
+/** Past the limit, lines may have ceased to count: then nothing limits. */
+function numberOrNull(shop: Shop, demand: number, count: bigint): number | null {
+  return count === LIMIT && !limited(shop, demand, true) ? null : Number(count);
+}
+
 /** Kits of each demand that are complete today, strict: the last demand's are not held to what was asked. */
 function strictBuildable(shop: Shop): (number | null)[] {
   const answer: (number | null)[] = [];
@@ -63,20 +76,39 @@ function strictBuildable(shop: Shop): (number | null)[] {
     const stoppedBefore = answer.some(
       (built, i) => alike(shop, i, at) && built !== null && BigInt(built) < BigInt(shop.demand[i].quantity),
     );
-    if (!limited(shop, demand.partNumber)) answer.push(null);
+    if (!limited(shop, at)) answer.push(null);
     else if (stoppedBefore) answer.push(0);
     else {
       const adds = (n: bigint) => missingFor(shop, [...before, ...blocksOf(shop, at, n, false)]);
-      answer.push(Number(largest(last ? LIMIT : BigInt(demand.quantity), (n) => same(adds(n), base))));
+      const most = last ? LIMIT : BigInt(demand.quantity);
+      answer.push(
+        numberOrNull(
+          shop,
+          at,
+          largest(most, (n) => same(adds(n), base)),
+        ),
+      );
     }
   });
   return answer;
 }
 
+/** With release: what ships of each demand; the last one, where all of it ships, goes on past what was asked. */
+function releaseBuildable(shop: Shop, shipped: Kits[]): (number | null)[] {
+  return shop.demand.map((demand, at) => {
+    if (!limited(shop, at)) return null;
+    const count = shipped.filter((kit) => kit.demand === at).length;
+    if (at < shop.demand.length - 1 || count < Number(demand.quantity)) return count;
+    const others = shipped.filter((kit) => kit.demand !== at);
+    const all = (n: bigint) => [...others, ...blocksOf(shop, at, n, false)];
+    return numberOrNull(
+      shop,
+      at,
+      largest(LIMIT, (n) => lacksNothing(shop, all(n))),
+    );
+  });
+}
+
 export function naiveBuildable(shop: Shop, order: ServiceOrder): (number | null)[] {
-  const { shipped } = order;
-  if (shipped === null || shipped.length === order.blocks.length) return strictBuildable(shop);
-  return shop.demand.map((demand, at) =>
-    limited(shop, demand.partNumber) ? shipped.filter((kit) => kit.demand === at).length : null,
-  );
+  return order.shipped === null ? strictBuildable(shop) : releaseBuildable(shop, order.shipped);
 }

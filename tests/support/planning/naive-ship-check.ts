@@ -41,16 +41,21 @@ function costOf(shop: Shop, netting: Netting): string {
   return toText((2n * cents.over + cents.under) / (2n * cents.under), 2);
 }
 
+/** When the kits of each block are complete, each with those served before it. */
+function completeOn(shop: Shop, blocks: Kits[]): IsoDate[] {
+  const coming = naiveNetting(shop, blocks, "coming");
+  return blocks.map((block, at) => naiveReady(shop, coming, at)(block.partNumber));
+}
+
 /** One rung, planned from nothing for the kits up to it. Stoppers in part number order. */
 function rung(shop: Shop, blocks: Kits[], kits: number): Rung {
-  const ready = naiveReady(shop, naiveNetting(shop, blocks, "coming"), every(blocks));
   const missing = [...missingFor(shop, blocks)].filter(([, amount]) => amount > 0n);
   const decimals = new Map(shop.parts.map((part) => [part.partNumber, part.decimals]));
   return {
     partNumber: blocks[blocks.length - 1].partNumber,
     kits,
     cost: costOf(shop, naiveNetting(shop, blocks, "coming-by-date")),
-    readyOn: blocks.map((block) => ready(block.partNumber)).sort()[blocks.length - 1],
+    readyOn: completeOn(shop, blocks).sort()[blocks.length - 1],
     stoppers: missing
       .map(([partNumber, amount]) => ({ partNumber, missing: toText(amount, decimals.get(partNumber) ?? 0) }))
       .sort(byNumber),
@@ -88,7 +93,7 @@ function datesFor(shop: Shop, blocks: Kits[], byDate: Netting, partNumber: strin
 }
 
 function shortages(shop: Shop, blocks: Kits[], byDate: Netting): Shortage[] {
-  const ready = naiveReady(shop, naiveNetting(shop, blocks, "coming"), every(blocks));
+  const ready = naiveReady(shop, naiveNetting(shop, blocks, "coming"), blocks.length - 1);
   return [...missingFor(shop, blocks)]
     .filter(([, amount]) => amount > 0n)
     .map(([partNumber, amount]) => {
@@ -141,11 +146,11 @@ export function naiveShipCheck(shop: Shop): NaiveAnswer {
   const { blocks } = order;
   const total = sum(blocks.map((block) => block.count));
   const built = naiveBuildable(shop, order);
-  const coming = naiveNetting(shop, blocks, "coming");
+  const complete = completeOn(shop, blocks);
   const byDate = naiveNetting(shop, blocks, "coming-by-date");
   const demand = shop.demand.map((asked, at) => {
-    const own = every(blocks).filter((i) => blocks[i].demand === at);
-    const earliest = naiveReady(shop, coming, own)(asked.partNumber);
+    const dates = complete.filter((_, i) => blocks[i].demand === at).sort();
+    const earliest = dates[dates.length - 1];
     return { ...asked, options: [...asked.options], buildable: built[at], earliest };
   });
   const buildable: Record<string, number | null> = Object.create(null);
@@ -153,8 +158,7 @@ export function naiveShipCheck(shop: Shop): NaiveAnswer {
   for (const row of demand) {
     const before = row.partNumber in buildable ? buildable[row.partNumber] : 0;
     buildable[row.partNumber] = before === null || row.buildable === null ? null : before + row.buildable;
-    const known = earliest[row.partNumber] ?? row.earliest;
-    earliest[row.partNumber] = known > row.earliest ? known : row.earliest;
+    earliest[row.partNumber] = [earliest[row.partNumber] ?? row.earliest, row.earliest].sort()[1];
   }
   const rungs = Number(smaller(total, 1000n));
   const ladder = Array.from({ length: rungs }, (_, at) =>

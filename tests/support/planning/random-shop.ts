@@ -1,5 +1,5 @@
 import fc from "fast-check";
-import type { IsoDate, PlanDemand, PlanLine, PlanPart } from "~/domain/planning/types";
+import type { IsoDate, PlanDemand, PlanLine, PlanPart, PlanSupply } from "~/domain/planning/types";
 import { buildDemand, buildLine, buildPart, buildStock, buildSupply, type Shop, TODAY } from "./factories";
 import { addDays } from "./naive-netting";
 import { toText } from "./rational";
@@ -170,19 +170,17 @@ function stockOf(parts: PlanPart[], wishes: Wishes) {
   return fc.array(row, { maxLength: parts.length * 2 });
 }
 
-function supplyOf(parts: PlanPart[], wishes: Wishes) {
+function supplyOf(parts: PlanPart[], wishes: Wishes): fc.Arbitrary<PlanSupply[]> {
   if (wishes.supply === false) return fc.constant([]);
   const places = parts.flatMap((part, at) => (part.sourcing === "phantom" ? [] : [at]));
-  const row = fc
-    .constantFrom(...places)
-    .chain((at) =>
-      fc
-        .record({
-          quantity: steps(at >= OPEN ? 20 : 3, parts[at].decimals),
-          due: fc.option(dateAround(-10, 70), { freq: 6 }),
-        })
-        .map(({ quantity, due }) => buildSupply(parts[at].partNumber, quantity, due)),
-    );
+  const row = fc.constantFrom(...places).chain((at) =>
+    fc
+      .record({
+        quantity: steps(at >= OPEN ? 20 : 3, parts[at].decimals),
+        due: fc.option(dateAround(-10, 70), { freq: 6 }),
+      })
+      .map(({ quantity, due }) => buildSupply(parts[at].partNumber, quantity, due)),
+  );
   return fc.array(row, { maxLength: parts.length });
 }
 

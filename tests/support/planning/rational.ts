@@ -49,6 +49,5 @@ export function toText(steps: bigint, decimals: number): string {
 }
 
 export function smaller(a: bigint, b: bigint): bigint {
-  // biome-ignore lint/complexity/useMathMinMax: Math.min takes no bigint.
   return a < b ? a : b;
 }
