@@ -43,9 +43,16 @@ function checkFirstConnection(client: Sequelize): void {
 export const sequelize: Sequelize = globalThis.__cotterpinSequelize ?? openClient();
 globalThis.__cotterpinSequelize = sequelize;
 
-/** Lets running queries finish and closes every connection; the process can end after it. */
+const CLOSE_MILLISECONDS = 5_000;
+
+/** Lets running queries finish, for five seconds at most, and closes every connection; the process can end after it. */
 export async function closeDatabase(): Promise<void> {
-  await sequelize.close();
+  let timer: NodeJS.Timeout | undefined;
+  const limit = new Promise<void>((resolve) => {
+    timer = setTimeout(resolve, CLOSE_MILLISECONDS);
+  });
+  await Promise.race([sequelize.close(), limit]);
+  clearTimeout(timer);
 }
 
 globalThis.__cotterpinClose = closeDatabase;

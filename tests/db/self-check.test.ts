@@ -1,29 +1,29 @@
 import { QueryTypes, Sequelize } from "sequelize";
-import { afterEach, describe, expect, it } from "vitest";
+import { describe, expect, it } from "vitest";
 import { sequelize as application } from "~/db/client.server";
 import { connectionOptions } from "~/db/connection-options";
 import { assertDriverIsExact, type RawConnection } from "~/db/self-check.server";
 import { useTestDatabase } from "../support/database";
 
 const database = useTestDatabase();
-let opened: Sequelize | undefined;
 
-/** A connection as the mapper makes it, with some of the driver's options changed. */
-async function connect(changes: object): Promise<RawConnection> {
+/** Asks through a connection as the mapper makes it, with some of the driver's options changed. */
+async function check(changes: object): Promise<void> {
   const options = connectionOptions(database.appUrl);
-  opened = new Sequelize({ ...options, dialectOptions: { ...options.dialectOptions, ...changes } });
-  const manager = opened.connectionManager as unknown as { getConnection(): Promise<RawConnection> };
-  return manager.getConnection();
+  const opened = new Sequelize({ ...options, dialectOptions: { ...options.dialectOptions, ...changes } });
+  const { connectionManager } = opened;
+  const connection = await connectionManager.getConnection({} as never);
+  try {
+    await assertDriverIsExact(connection as unknown as RawConnection);
+  } finally {
+    connectionManager.releaseConnection(connection);
+    await opened.close();
+  }
 }
 
 describe("assertDriverIsExact", () => {
-  afterEach(async () => {
-    await opened?.close();
-    opened = undefined;
-  });
-
   it("is content with the options of this release", async () => {
-    await expect(assertDriverIsExact(await connect({}))).resolves.toBeUndefined();
+    await expect(check({})).resolves.toBeUndefined();
   });
 
   it.each([
@@ -31,9 +31,8 @@ describe("assertDriverIsExact", () => {
     ["big integers as BigInt", { bigIntAsNumber: false }, "big integer"],
     ["decimals as numbers", { decimalAsNumber: true, checkNumberRange: false }, "exact decimal"],
   ])("refuses %s in one sentence", async (_what, changes, named) => {
-    const connection = await connect(changes);
     const refusal = new RegExp(`^The database driver changes values .*\\(.*${named}.*\\)[^.]*\\.$`);
-    await expect(assertDriverIsExact(connection)).rejects.toThrow(refusal);
+    await expect(check(changes)).rejects.toThrow(refusal);
   });
 
   it("is asked by the application itself, whose driver keeps every digit", async () => {
