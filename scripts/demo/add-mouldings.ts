@@ -11,16 +11,15 @@ const CLOTHS: Record<string, { partNumber: string; name: string; grams: number; 
   K1: { partNumber: "GF-5170", name: "aramid 170", grams: 170, glassToResin: 0.9 },
   C2: { partNumber: "CF-3200", name: "carbon 200", grams: 200, glassToResin: 0.8 },
 };
-const PLACES = ["full", "full", "left", "right", "keel and corners", "flange", "centre"];
+const PLACES = ["full", "full", "forward", "aft", "keel and corners", "flange", "centre"];
 const SHARES: Record<string, number> = {
   full: 1,
-  left: 0.54,
-  right: 0.54,
+  forward: 0.54,
+  aft: 0.54,
   "keel and corners": 0.38,
   flange: 0.24,
   centre: 0.46,
 };
-const CORE_PLACES = ["front", "rear", "left", "right"];
 
 /** Moulded parts: gelcoat, ply pack, core, resin and catalyst by weight, and the films that go to waste. A line is `NUMBER Name | m2 | cloths | core mm:m2 colour`. */
 export function addMouldings(book: Book, text: string): void {
@@ -109,15 +108,16 @@ function addPlies(book: Book, { partNumber, name, area, cloths }: Moulding): num
   return resin;
 }
 
-function addCore(book: Book, { partNumber, name, core }: Moulding): void {
+function addCore(book: Book, moulding: Moulding): void {
+  const { partNumber, core } = moulding;
   const [thickness, total] = core.split(":").map(Number);
   const pieces = total > 2 ? 4 : total > 0.7 ? 2 : 1;
   for (let index = 0; index < pieces; index++) {
     const piece = `${partNumber}-C${index + 1}`;
-    const place = pieces === 1 ? "" : `, ${CORE_PLACES[index]}`;
+    const name = pieces === 1 ? "Core" : `Core ${index + 1} of ${pieces}`;
     book.add({
       partNumber: piece,
-      description: `Core, ${lowerFirst(name)}${place}, ${thickness} mm, cut`,
+      description: `${name}, ${lowerFirst(moulding.name)}, ${thickness} mm, cut`,
       sourcing: "make",
       leadTimeDays: 1,
     });

@@ -79,7 +79,7 @@ function partRow(part: BookPart): Cell[] {
     cheap ? 56 : "",
     part.yield === 1 ? "" : part.yield,
     part.cost === null ? "" : money(part.cost),
-    part.mass === null ? "" : part.mass.toFixed(part.mass < 0.01 ? 4 : 3),
+    part.mass === null ? "" : kilograms(part.mass),
     part.sold ? 1 : "",
   ];
 }
@@ -246,6 +246,8 @@ function movementsFile(book: Book, movements: readonly PastMovement[]): string {
     ]),
   );
 }
+
+const kilograms = (mass: number) => (mass === 0 ? "0" : mass.toFixed(mass < 0.01 ? 4 : 3));
 
 /** Cents, and tenths of a cent where pennies count. */
 const money = (cost: number) => cost.toFixed(cost < 1 ? 3 : 2);

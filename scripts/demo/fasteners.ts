@@ -64,7 +64,7 @@ function describeRing(partNumber: string): Fastener | null {
   const mass = Number(thread) ** 3 * RINGS[kind].volume * 1.3 * STEEL_KG_PER_MM3;
   return bought(
     partNumber,
-    `${RINGS[kind].name}, M${thread}, ${GRADES[grade].name}`,
+    `${RINGS[kind].name}, M${thread}, ${grade === "Z" ? "zinc" : GRADES[grade].name}`,
     mass,
     0.012 + mass * 6 * GRADES[grade].price,
   );

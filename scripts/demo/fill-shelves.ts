@@ -92,7 +92,7 @@ const ORDERS_AHEAD: Wanted[] = [
 
 /** Goods that are there and do not count: held in the cage, or out of date. */
 const OUT_OF_REACH: Omit<StockRow, "bin">[] = [
-  { partNumber: "HB-2041", lot: "26-0388", state: "held", steps: 14, expiresOn: "" },
+  { partNumber: "HB-2041", lot: "26-0466", state: "held", steps: 14, expiresOn: "" },
   { partNumber: "LD-2101", lot: "", state: "held", steps: 4, expiresOn: "" },
   { partNumber: "AD-310", lot: "26-0119", state: "usable", steps: 11_400, expiresOn: "2026-11-12" },
   { partNumber: "SK-0022", lot: "25-0467", state: "usable", steps: 2_350, expiresOn: "2026-10-30" },

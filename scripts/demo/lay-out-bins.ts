@@ -81,11 +81,19 @@ const ZONES: Zone[] = [
   { letter: "E", name: "Engine floor", racks: 4, levels: 1, what: "Floor bay", families: ["EN"] },
   {
     letter: "F",
-    name: "Cloth and cutting room",
-    racks: 8,
+    name: "Cloth",
+    racks: 4,
     levels: 4,
     what: "Roll rack",
-    families: ["GF", "CF", "PLY"],
+    families: ["GF", "CF", "TR", "CLOTH"],
+  },
+  {
+    letter: "P",
+    name: "Cutting room",
+    racks: 6,
+    levels: 4,
+    what: "Shelf",
+    families: ["PLY"],
   },
   {
     letter: "R",
@@ -172,7 +180,7 @@ export function overflowBin(partNumber: string, home: string): string {
 
 function zoneOf(partNumber: string): Zone {
   const family =
-    /-[PC]\d*$/.test(partNumber) && !partNumber.startsWith("PK")
+    /^[A-Z]{2}-\d{4}[LR]?-[PC]\d*$/.test(partNumber) && !partNumber.startsWith("W")
       ? "PLY"
       : partNumber.startsWith("TY-W")
         ? "TY-W"

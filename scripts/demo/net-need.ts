@@ -2,7 +2,7 @@ import type { Book, BookLine } from "./book";
 import { linesByParent } from "./lines-by-parent";
 import { sortPartNumbers } from "./sort-part-numbers";
 
-export const today = "2026-12-01";
+const today = "2026-12-01";
 
 /** Amounts by part number, in whole steps of each part. */
 export type Amounts = ReadonlyMap<string, number>;

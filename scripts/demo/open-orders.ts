@@ -41,7 +41,7 @@ const BUILDS: [string, number, string][] = [
 
 /** Above every number of the past year. */
 const FIRST_PURCHASE = 901;
-const FIRST_BUILD = 851;
+const FIRST_BUILD = 901;
 
 /** Open purchase orders, one supplier each, and open builds. */
 export function openOrders(book: Book, suppliers: readonly Supplier[]): Supply[] {
@@ -80,12 +80,17 @@ function chanceOrders(book: Book): Omit<Supply, "reference">[] {
       BOUGHT.some(([partNumber]) => partNumber === part.partNumber);
     if (part.sourcing !== "buy" || taken || !chances.chance(0.055)) continue;
     const pack = packOf(part);
-    const packs = pack.per > 1 || (part.cost ?? 0) > 60 ? chances.whole(1, 3) : chances.pick([5, 10, 10, 20]);
+    const packs =
+      pack.per > 1 || (part.cost ?? 0) > 60
+        ? chances.whole(1, 3)
+        : (part.cost ?? 0) > 4
+          ? chances.pick([3, 4, 5, 6, 10])
+          : chances.pick([10, 20, 25]);
     const late = chances.chance(0.12);
     lines.push({
       partNumber: part.partNumber,
       quantity: Number((packs * pack.per * pack.multiple).toFixed(part.decimals)),
-      due: day(late ? -chances.whole(2, 24) : chances.whole(2, 80)),
+      due: day(late ? -chances.whole(2, 24) : chances.whole(2, Math.min(80, part.leadTimeDays))),
     });
   }
   return lines;
@@ -101,6 +106,8 @@ function splitOrders(code: string, lines: Omit<Supply, "reference">[]): Omit<Sup
 
 function day(offset: number): string {
   const date = new Date(Date.UTC(2026, 11, 1 + offset));
+  const closed = date >= new Date("2026-12-24") && date <= new Date("2027-01-03");
+  if (closed) date.setTime(Date.UTC(2027, 0, 5));
   const weekday = date.getUTCDay();
   if (weekday === 0) date.setUTCDate(date.getUTCDate() + 1);
   if (weekday === 6) date.setUTCDate(date.getUTCDate() - 1);

@@ -35,8 +35,23 @@ export interface Recalled {
   chances: Random;
 }
 
+const firstDate = Date.UTC(2024, 11, 30);
+
+export const dayOf = (date: string) => Math.round((Date.parse(date) - firstDate) / 86_400_000);
+
+/** Moment of an hour of a day of the history, in milliseconds. */
+export const timeOf = (day: number, hour: number) => firstDate + day * 86_400_000 + hour * 3_600_000;
+
 /** The last whole day of the history; a hundred weeks have 700. */
 export const lastDay = 699;
+
+const FIRST_OF_YEAR: Record<string, number> = { "25": 2, "26": 367 };
+
+/** The day on which a lot came in: lots are numbered through the year. */
+export function lotDay(lot: string): number {
+  const [year, number] = lot.split("-");
+  return workday((FIRST_OF_YEAR[year] ?? 0) + Math.floor(Number(number) * 0.67));
+}
 
 /** The Friday before, for a weekend. */
 export const workday = (day: number) => Math.max(0, day - Math.max(0, (day % 7) - 4));

@@ -1,4 +1,13 @@
-import { jobReference, type PastEvent, type Place, type Recalled, workday } from "./past-event";
+import {
+  dayOf,
+  jobReference,
+  lastDay,
+  lotDay,
+  type PastEvent,
+  type Place,
+  type Recalled,
+  workday,
+} from "./past-event";
 
 /** Days on which a batch of kits was started, with the number of kits. */
 const S2_BATCHES: [number, number][] = [
@@ -34,12 +43,13 @@ export function issuesOf(recalled: Recalled): PastEvent[] {
   const { row, uses, chances, job } = recalled;
   const here: Place = [row.bin, "usable"];
   const isLot = row.lot !== "";
-  const first = isLot ? 500 : 0;
+  const first = isLot ? lotDay(row.lot) + 4 : 0;
+  const last = row.expiresOn === "" ? lastDay : Math.min(lastDay, dayOf(row.expiresOn));
   const out = { from: here, to: null, reason: "" };
   const events: PastEvent[] = [];
   for (const [start, taken] of batchesOf(uses)) {
     const steps = Math.round(taken * (isLot ? 0.4 : 1));
-    if (steps === 0 || start < first || chances.chance(0.14)) continue;
+    if (steps === 0 || start < first || start + 9 > last || chances.chance(0.14)) continue;
     const day = workday(start + chances.whole(0, 9));
     const reference = jobReference(start, job);
     const few = Math.max(1, Math.round(steps * 0.05));
@@ -66,20 +76,20 @@ export function issuesOf(recalled: Recalled): PastEvent[] {
         to: here,
       });
   }
-  if (events.length === 0 && uses.s2 + uses.s4 > 0 && chances.chance(0.5)) {
-    const day = workday(chances.whole(first + 40, 690));
+  if (events.length === 0 && last > 690 && uses.s2 + uses.s4 > 0 && chances.chance(0.5)) {
+    const day = workday(chances.whole(Math.max(first, Math.min(first + 40, 680)), 695));
     events.push({
       ...out,
       day,
       hour: 13,
       kind: "issue",
-      steps: Math.max(uses.s2, uses.s4),
-      reason: "Sold as spares",
+      steps: Math.ceil(Math.max(uses.s2, uses.s4)),
+      reason: recalled.part.decimals > 0 ? "Repair work" : "Sold as spares",
       reference: "",
     });
   }
   if (chances.chance(0.09)) {
-    const day = workday(chances.whole(620, 692));
+    const day = workday(chances.whole(Math.max(first, 620), 694));
     events.push({
       ...out,
       day,

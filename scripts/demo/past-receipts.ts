@@ -1,4 +1,12 @@
-import { goodsIn, type PastEvent, type Place, type Recalled, sourceReference, workday } from "./past-event";
+import {
+  goodsIn,
+  lotDay,
+  type PastEvent,
+  type Place,
+  type Recalled,
+  sourceReference,
+  workday,
+} from "./past-event";
 
 /** A delivery or a finished build: straight to its bin, by way of goods in, or held there until it was looked at. */
 export function receiptsOf(recalled: Recalled, onDay: number, steps: number): PastEvent[] {
@@ -52,7 +60,7 @@ export function receiptsOf(recalled: Recalled, onDay: number, steps: number): Pa
 /** Received, carried to the cage and held there. */
 export function heldPast(recalled: Recalled): PastEvent[] {
   const { part, row, chances } = recalled;
-  const day = workday(700 - chances.whole(12, 60));
+  const day = row.lot === "" ? workday(700 - chances.whole(12, 60)) : lotDay(row.lot);
   const bench = goodsIn(day);
   const cage: Place = [row.bin, "usable"];
   const reason = HELD_FOR[part.partNumber] ?? "Waits for inspection";

@@ -3,7 +3,7 @@ import type { StockRow } from "./fill-shelves";
 import { netNeed } from "./net-need";
 import { numberReferences } from "./number-references";
 import { packOf } from "./pack-of";
-import { lastDay, type MovementKind, type PastEvent, type Recalled } from "./past-event";
+import { lastDay, lotDay, type MovementKind, type PastEvent, type Recalled, timeOf } from "./past-event";
 import { issuesOf } from "./past-issues";
 import { heldPast, receiptsOf } from "./past-receipts";
 import { seededRandom } from "./random";
@@ -23,16 +23,14 @@ export interface PastMovement {
   reference: string;
 }
 
-const FIRST_DAY = Date.UTC(2024, 11, 30);
-
 /** A hundred weeks of movements that end in exactly the balances given. */
 export function recallMovements(
   book: Book,
   rows: readonly StockRow[],
   suppliers: readonly Supplier[],
 ): PastMovement[] {
-  const s2 = netNeed(book, [{ kit: "S2", quantity: 1 }], new Map());
-  const s4 = netNeed(book, [{ kit: "S4", quantity: 1 }], new Map());
+  const s2 = netNeed(book, [{ kit: "S2", quantity: 10 }], new Map());
+  const s4 = netNeed(book, [{ kit: "S4", quantity: 10 }], new Map());
   const jobs = findJobs(book);
   const movements: PastMovement[] = [];
   for (const row of rows) {
@@ -41,7 +39,7 @@ export function recallMovements(
     const recalled = {
       part,
       row,
-      uses: { s2: s2.get(partNumber) ?? 0, s4: s4.get(partNumber) ?? 0 },
+      uses: { s2: (s2.get(partNumber) ?? 0) / 10, s4: (s4.get(partNumber) ?? 0) / 10 },
       job: jobs.get(partNumber) ?? partNumber,
       source: part.sourcing === "buy" ? preferredSupplier(part, suppliers).code : "",
       chances: seededRandom(`${nameOf(row)}/past`),
@@ -74,8 +72,8 @@ function usablePast(recalled: Recalled): PastEvent[] {
   let next = lastDay;
   for (const event of issuesOf(recalled).reverse()) {
     const worth = Math.max(unit, Math.ceil((event.steps * (1.2 + chances.next() * 1.6)) / unit) * unit);
-    while (there >= worth && next - event.day > 14 && chances.chance(0.62)) {
-      next = chances.whole(event.day + 3, Math.min(next - 1, event.day + 90));
+    while (row.lot === "" && there >= worth && next - event.day > 14 && chances.chance(0.62)) {
+      next = chances.whole(event.day + 3, Math.min(next - 9, event.day + 90));
       events.push(...receiptsOf(recalled, next, worth));
       there -= worth;
     }
@@ -86,7 +84,14 @@ function usablePast(recalled: Recalled): PastEvent[] {
     next = event.day;
   }
   if (there > 0)
-    events.push(...firstReceipt(recalled, there, Math.max(0, next - chances.whole(2, 30)), unit));
+    events.push(
+      ...firstReceipt(
+        recalled,
+        there,
+        row.lot === "" ? Math.max(0, next - chances.whole(2, 30)) : lotDay(row.lot),
+        unit,
+      ),
+    );
   return events;
 }
 
@@ -149,7 +154,7 @@ const SPREAD: Record<MovementKind, number> = {
 
 function written(row: StockRow, event: PastEvent): PastMovement {
   const minutes = seededRandom(`${nameOf(row)}/${event.day}/${event.kind}`).whole(0, SPREAD[event.kind]);
-  const at = FIRST_DAY + event.day * 86_400_000 + event.hour * 3_600_000 + minutes * 60_000;
+  const at = timeOf(event.day, event.hour) + minutes * 60_000;
   return {
     happenedAt: new Date(at).toISOString().replace(".000Z", "Z"),
     kind: event.kind,
