@@ -10,6 +10,7 @@ let refusing = false;
  * @property {NodeJS.ProcessEnv} [env]
  * @property {"inherit" | "quiet"} [output] quiet keeps the output and gives it back
  * @property {string} [cwd]
+ * @property {(line: string) => void} [onLine] hears each line of standard output as it comes, where the output is quiet
  */
 
 /**
@@ -32,8 +33,10 @@ export function runCommand(command, commandArguments, options = {}) {
   let output = "";
   let standardOutput = "";
   child.stdout?.setEncoding("utf8").on("data", (text) => {
+    const begun = standardOutput.lastIndexOf("\n") + 1;
     output += text;
     standardOutput += text;
+    for (const line of standardOutput.slice(begun).split("\n").slice(0, -1)) options.onLine?.(line);
   });
   child.stderr?.setEncoding("utf8").on("data", (text) => {
     output += text;

@@ -30,7 +30,10 @@ export async function prepareSchema({ addresses, local, demo, empty }: Preparati
 
 async function run(script: string, what: string, addresses: SchemaAddresses): Promise<void> {
   say(what);
-  const { code, output } = await runTypeScript(script, { ...addresses });
+  // Its lines begin with seconds of its own.
+  const pass = (line: string) =>
+    /^\s*[\d.]+ s\s/.test(line) && say(`  ${line.replace(/^\s*[\d.]+ s\s+/, "")}`);
+  const { code, output } = await runTypeScript(script, { ...addresses }, pass);
   if (code === 0) return;
   throw new StopSentence(`${what} did not work: ${output.trim().split("\n").slice(-12).join("\n")}`);
 }
