@@ -1,8 +1,8 @@
 import type { Transaction } from "sequelize";
+import { readRows } from "~/db/read-rows.server";
 import { compileStructure } from "~/domain/planning/compile-structure";
 import { partKey } from "~/domain/planning/part-key";
 import type { PartRow } from "~/schemas/imports/parts";
-import { readRows } from "~/db/read-rows.server";
 import type { RecordChange, StoredRecord } from "./decide-records";
 import { readBookLines } from "./read-book-lines.server";
 

@@ -1,8 +1,8 @@
 import type { Transaction } from "sequelize";
+import { readRows } from "~/db/read-rows.server";
 import { partKey } from "~/domain/planning/part-key";
 import { type KitOrderRow, kitOrdersKind } from "~/schemas/imports/kit-orders";
 import { findKits } from "~/services/kit-orders/find-kits.server";
-import { readRows } from "~/db/read-rows.server";
 import { checkKitOrders, type StoredKitOrder } from "./check-kit-orders";
 import { decideRecords, type RecordChange } from "./decide-records";
 import type { ImportContext, ImportJob, ImportPlan } from "./import-job";

@@ -1,7 +1,7 @@
 import type { Transaction } from "sequelize";
+import { readRows } from "~/db/read-rows.server";
 import { partKey } from "~/domain/planning/part-key";
 import { type OfferRow, offersKind } from "~/schemas/imports/offers";
-import { readRows } from "~/db/read-rows.server";
 import type { CsvProblem } from "~/utils/csv/csv-problem";
 import { trimDecimal } from "~/utils/format/trim-decimal";
 import { checkStored } from "./check-stored";

@@ -1,6 +1,6 @@
+import { readRows } from "~/db/read-rows.server";
 import { partKey } from "~/domain/planning/part-key";
 import { type StockRow, stockKind } from "~/schemas/imports/stock";
-import { readRows } from "~/db/read-rows.server";
 import { postMovements } from "~/services/stock/post-movements.server";
 import type { ImportContext, ImportJob, ImportPlan } from "./import-job";
 import { adjustmentOf, type BalanceGoal, planBalances } from "./plan-balances";

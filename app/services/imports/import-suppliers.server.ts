@@ -1,7 +1,7 @@
 import type { Transaction } from "sequelize";
+import { readRows } from "~/db/read-rows.server";
 import { partKey } from "~/domain/planning/part-key";
 import { type SupplierRow, suppliersKind } from "~/schemas/imports/suppliers";
-import { readRows } from "~/db/read-rows.server";
 import { decideRecords, type RecordChange, type StoredRecord } from "./decide-records";
 import type { ImportContext, ImportJob, ImportPlan } from "./import-job";
 import type { ImportAnswer } from "./present-import";

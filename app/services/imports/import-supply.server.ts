@@ -1,6 +1,6 @@
 import type { Transaction } from "sequelize";
-import { type SupplyRow, supplyKind } from "~/schemas/imports/supply";
 import { readRows } from "~/db/read-rows.server";
+import { type SupplyRow, supplyKind } from "~/schemas/imports/supply";
 import type { ImportContext, ImportJob, ImportPlan } from "./import-job";
 import { planSupply, type SupplyChange } from "./plan-supply";
 import type { ImportAnswer } from "./present-import";

@@ -1,6 +1,6 @@
 import type { Transaction } from "sequelize";
-import { partKey } from "~/domain/planning/part-key";
 import { readRows } from "~/db/read-rows.server";
+import { partKey } from "~/domain/planning/part-key";
 import { trimDecimal } from "~/utils/format/trim-decimal";
 
 /** What is on hand, by `balancePlace`, with the bins and the dates of lots that there are. */

@@ -1,6 +1,6 @@
 import type { Transaction } from "sequelize";
-import type { StructureRow } from "~/schemas/imports/structure";
 import { readRows } from "~/db/read-rows.server";
+import type { StructureRow } from "~/schemas/imports/structure";
 import { trimDecimal } from "~/utils/format/trim-decimal";
 import { trimOrNull } from "./read-part-records.server";
 

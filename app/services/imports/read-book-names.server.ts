@@ -1,6 +1,6 @@
 import type { Transaction } from "sequelize";
-import type { Sourcing } from "~/domain/planning/types";
 import { readRows } from "~/db/read-rows.server";
+import type { Sourcing } from "~/domain/planning/types";
 
 /** What a row needs of the part or supplier it names. */
 export interface BookName {

@@ -1,6 +1,6 @@
 import type { Transaction } from "sequelize";
-import type { PartRow } from "~/schemas/imports/parts";
 import { readRows } from "~/db/read-rows.server";
+import type { PartRow } from "~/schemas/imports/parts";
 import { trimDecimal } from "~/utils/format/trim-decimal";
 import type { StoredRecord } from "./decide-records";
 

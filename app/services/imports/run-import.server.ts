@@ -1,10 +1,10 @@
 import { createHash } from "node:crypto";
 import type { Transaction } from "sequelize";
 import { inTransaction } from "~/db/in-transaction.server";
+import { readRows } from "~/db/read-rows.server";
 import { appendAuditEvent } from "~/services/audit/append-audit-event.server";
 import { assertMay } from "~/services/people/assert-may.server";
 import type { CurrentPerson } from "~/services/people/current-person";
-import { readRows } from "~/db/read-rows.server";
 import { raiseRevision } from "~/services/revision/raise-revision.server";
 import type { RevisionName } from "~/services/revision/revision-name";
 import type { CsvProblem } from "~/utils/csv/csv-problem";
