@@ -31,7 +31,7 @@ export function naiveReady(shop: Shop, netting: Netting, last: number): (partNum
     const bought = part.sourcing === "buy" || (part.sourcing === "make" && lines.length === 0);
     if (bought) return addDays(shop.today, part.leadTimeDays);
     const components = lines
-      .filter((line) => some(netting.lineNeed(line), blocksOf(partNumber)))
+      .filter((line) => netting.takes(line, blocksOf(partNumber)))
       .map((line) => ready(line.component))
       .reduce(later, shop.today);
     return part.sourcing === "phantom" ? components : addDays(components, part.leadTimeDays);
@@ -58,8 +58,7 @@ export function naiveNeedBy(
   blocks: number[],
 ): (partNumber: string) => IsoDate | null {
   function through(line: PlanLine): IsoDate[] {
-    if (!some(netting.figures(line.parent).start, blocks)) return [];
-    if (!some(netting.lineNeed(line), blocks)) return [];
+    if (!netting.takes(line, blocks)) return [];
     const parent = netting.part(line.parent);
     const date = needBy(line.parent);
     if (date === null) return [];

@@ -38,8 +38,8 @@ export interface Figures {
 export interface Netting {
   part(partNumber: string): PlanPart;
   figures(partNumber: string): Figures;
-  /** What a line adds to its component's need, an entry a block. */
-  lineNeed(line: PlanLine): bigint[];
+  /** Whether what is started of the parent for any of these blocks takes the component by this line. */
+  takes(line: PlanLine, blocks: number[]): boolean;
 }
 
 export function addDays(date: IsoDate, days: number): IsoDate {
@@ -191,5 +191,11 @@ export function naiveNetting(shop: Shop, blocks: Kits[], pass: Pass): Netting {
     return result;
   }
 
-  return { part, figures, lineNeed };
+  function takes(line: PlanLine, among: number[]): boolean {
+    const { start } = figures(line.parent);
+    const some = line.quantity !== null && rational(line.quantity).over > 0n;
+    return some && among.some((at) => start[at] > 0n && countsFor(line, blocks[at], shop.today));
+  }
+
+  return { part, figures, takes };
 }
