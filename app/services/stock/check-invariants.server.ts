@@ -30,11 +30,11 @@ const QUESTIONS = {
     LEFT JOIN audit_event ON audit_event.subject =
       CONVERT(CONCAT('movement ', COALESCE(movement.reverses, movement.id)) USING utf8mb4) COLLATE utf8mb4_bin
     WHERE movement.line = 0 AND audit_event.id IS NULL`,
-  "acknowledged but not stored, or stored twice": `SELECT COUNT(*) AS found FROM
-    (SELECT idempotency_key.id FROM idempotency_key LEFT JOIN movement ON movement.idempotency_key_id = idempotency_key.id
-      WHERE idempotency_key.status = 'done' AND JSON_TYPE(JSON_EXTRACT(idempotency_key.result, '$.movements')) = 'ARRAY'
-      GROUP BY idempotency_key.id
-      HAVING COUNT(movement.id) <> MAX(JSON_LENGTH(idempotency_key.result, '$.movements'))) AS differing`,
+  "acknowledged but not stored, or stored twice": `SELECT COUNT(*) AS found FROM idempotency_key
+    LEFT JOIN (SELECT idempotency_key_id, COUNT(*) AS movements FROM movement GROUP BY idempotency_key_id) AS stored
+      ON stored.idempotency_key_id = idempotency_key.id
+    WHERE idempotency_key.status = 'done' AND JSON_TYPE(JSON_EXTRACT(idempotency_key.result, '$.movements')) = 'ARRAY'
+      AND COALESCE(stored.movements, 0) <> JSON_LENGTH(idempotency_key.result, '$.movements')`,
 } as const;
 
 export type Invariant = keyof typeof QUESTIONS;
