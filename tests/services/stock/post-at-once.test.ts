@@ -14,7 +14,7 @@ describe("posting at the same time", () => {
   });
   afterEach(expectSoundLedger);
 
-  it("loses none of 16 clients x 100 postings on one part", { timeout: 60_000 }, async () => {
+  it("loses none of 16 clients x 100 postings on one part", { timeout: 180_000 }, async () => {
     const client = async () => {
       for (let n = 0; n < 100; n++) await postPatiently([receive("HB-2041", "1", "A12")]);
     };
@@ -22,7 +22,7 @@ describe("posting at the same time", () => {
     expect(await onHand()).toBe("1600.000000");
   });
 
-  it("sells exactly 100 of 300 x 1,000 out of 100,000", { timeout: 30_000 }, async () => {
+  it("sells exactly 100 of 300 x 1,000 out of 100,000", { timeout: 90_000 }, async () => {
     await postPatiently([receive("HB-2041", "100000", "A12")]);
     const sales = Array.from({ length: 300 }, () => postPatiently([issue("HB-2041", "1000", "A12")]));
     const answers = await Promise.allSettled(sales);
@@ -32,7 +32,7 @@ describe("posting at the same time", () => {
     expect(await onHand()).toBe("0.000000");
   });
 
-  it("has one effect for one key sent 200 times", { timeout: 30_000 }, async () => {
+  it("has one effect for one key sent 200 times", { timeout: 90_000 }, async () => {
     const key = newKey();
     const sends = Array.from({ length: 200 }, () => patientlyUntilDone(key));
     const answers = await Promise.all(sends);

@@ -96,20 +96,24 @@ describe("a posting whose nth statement fails", () => {
     await expectSoundLedger();
   });
 
-  it.each(Object.keys(FAULTS) as (keyof typeof FAULTS)[])("is whole or nothing after %s", async (name) => {
-    const statements = await countStatements();
-    expect(statements).toBeGreaterThan(12);
-    let whole = 0;
-    for (let nth = 1; nth <= statements; nth++) {
-      const spy = breakStatement(nth, FAULTS[name]);
-      const answer = await postUntilTold(newKey()).catch((error: unknown) => error);
-      spy.mockRestore();
-      const done = !(answer instanceof Error);
-      expect({ nth, done }).toEqual({ nth, done: FAULTS[name].again });
-      whole += done ? 1 : 0;
-      const [{ movements }] = await database.query("SELECT COUNT(*) AS movements FROM movement");
-      expect(movements).toBe(1 + 2 * whole);
-      await expectSoundLedger();
-    }
-  });
+  it.each(Object.keys(FAULTS) as (keyof typeof FAULTS)[])(
+    "is whole or nothing after %s",
+    { timeout: 90_000 },
+    async (name) => {
+      const statements = await countStatements();
+      expect(statements).toBeGreaterThan(12);
+      let whole = 0;
+      for (let nth = 1; nth <= statements; nth++) {
+        const spy = breakStatement(nth, FAULTS[name]);
+        const answer = await postUntilTold(newKey()).catch((error: unknown) => error);
+        spy.mockRestore();
+        const done = !(answer instanceof Error);
+        expect({ nth, done }).toEqual({ nth, done: FAULTS[name].again });
+        whole += done ? 1 : 0;
+        const [{ movements }] = await database.query("SELECT COUNT(*) AS movements FROM movement");
+        expect(movements).toBe(1 + 2 * whole);
+        await expectSoundLedger();
+      }
+    },
+  );
 });
