@@ -1,10 +1,10 @@
 import { expect, test } from "@playwright/test";
-import { signInAs, watchForFaults } from "../support/browser-session";
+import { openPage, signInAs, watchForFaults } from "../support/browser-session";
 
 test("the planner asks whether ten S2 can ship and reads the answer", async ({ page }) => {
   const faults = watchForFaults(page);
   await signInAs(page, "idris");
-  await page.goto("/check?kit=S2&quantity=10");
+  await openPage(page, "/check?kit=S2&quantity=10");
   const answer = page.getByRole("status").first();
   await expect(answer).toContainText("Seven can go now. The eighth waits for");
   await expect(answer).toContainText(/All ten by \d+ \w+( \d{4})?, for [\d,]+\.\d\d more in parts\./);
@@ -23,7 +23,7 @@ test("the planner asks whether ten S2 can ship and reads the answer", async ({ p
 test("another number answers as one types, and the address follows", async ({ page }) => {
   const faults = watchForFaults(page);
   await signInAs(page, "idris");
-  await page.goto("/check?kit=S2&quantity=10");
+  await openPage(page, "/check?kit=S2&quantity=10");
   const kits = page.getByRole("spinbutton", { name: "How many kits" });
   await kits.fill("7");
   await expect(page.getByRole("status").first()).toHaveText("All seven can go now.");
@@ -42,7 +42,7 @@ test("another number answers as one types, and the address follows", async ({ pa
 
 test("a rung opens to all that it hangs on", async ({ page }) => {
   await signInAs(page, "idris");
-  await page.goto("/check?kit=S2&quantity=10");
+  await openPage(page, "/check?kit=S2&quantity=10");
   const top = page.getByRole("table", { name: "The ladder" }).getByRole("row").nth(1);
   const before = await top.getByRole("listitem").count();
   const more = top.getByRole("button", { name: /below|more/ });
@@ -55,7 +55,7 @@ test("a rung opens to all that it hangs on", async ({ page }) => {
 test("with the keyboard alone: number, kit, date, options, ship line", async ({ page }) => {
   const faults = watchForFaults(page);
   await signInAs(page, "idris");
-  await page.goto("/check?kit=S2&quantity=10");
+  await openPage(page, "/check?kit=S2&quantity=10");
   await expect(page.getByRole("region", { name: "Ship line" })).toContainText("ready");
   await page.keyboard.press("Tab");
   await expect(page.getByRole("link", { name: "Skip to the page" })).toBeFocused();
@@ -69,7 +69,9 @@ test("with the keyboard alone: number, kit, date, options, ship line", async ({ 
   await page.keyboard.press("Tab");
   await expect(page.getByRole("combobox", { name: "Which kit" })).toBeFocused();
   await page.keyboard.press("Tab");
-  await page.keyboard.type("31122029");
+  const date = page.getByLabel("By which date, empty for any");
+  await expect(date).toBeFocused();
+  await date.fill("2029-12-31");
   await page.keyboard.press("Enter");
   await expect(page).toHaveURL(/by=2029-12-31/);
   await page.getByRole("button", { name: "Any date" }).press("Enter");
@@ -85,7 +87,7 @@ test("with the keyboard alone: number, kit, date, options, ship line", async ({ 
 
 test("options count in the answer and in the address", async ({ page }) => {
   await signInAs(page, "idris");
-  await page.goto("/check?kit=S2&quantity=10");
+  await openPage(page, "/check?kit=S2&quantity=10");
   await page.getByText("no options").click();
   const first = page.getByRole("group", { name: "Options of the kit" }).getByRole("checkbox").first();
   await first.check();
@@ -96,7 +98,7 @@ test("options count in the answer and in the address", async ({ page }) => {
 
 test("an unknown kit is said in a sentence, and the question can be mended", async ({ page }) => {
   await signInAs(page, "idris");
-  await page.goto("/check?kit=NO-SUCH-KIT&quantity=2");
+  await openPage(page, "/check?kit=NO-SUCH-KIT&quantity=2");
   await expect(page.getByRole("status").first()).toContainText("NO-SUCH-KIT");
   await page.getByRole("combobox", { name: "Which kit" }).selectOption("S2");
   await expect(page.getByRole("status").first()).toHaveText("Both can go now.");
@@ -104,7 +106,7 @@ test("an unknown kit is said in a sentence, and the question can be mended", asy
 
 test("when the server does not answer, the last answer stays and the page says so", async ({ page }) => {
   await signInAs(page, "idris");
-  await page.goto("/check?kit=S2&quantity=10");
+  await openPage(page, "/check?kit=S2&quantity=10");
   await page.route("**/api/check-answer*", (route) =>
     route.fulfill({
       status: 503,
@@ -119,7 +121,7 @@ test("when the server does not answer, the last answer stays and the page says s
 
 test("the clerk reads the same answer without money", async ({ page }) => {
   await signInAs(page, "wren");
-  await page.goto("/check?kit=S2&quantity=10");
+  await openPage(page, "/check?kit=S2&quantity=10");
   await expect(page.getByRole("status").first()).toContainText("Seven can go now.");
   await expect(page.getByRole("columnheader", { name: "Cost" })).toHaveCount(0);
   await expect(page.getByText("in parts")).toHaveCount(0);
@@ -127,7 +129,7 @@ test("the clerk reads the same answer without money", async ({ page }) => {
 
 test("light or dark stays as chosen", async ({ page }) => {
   await signInAs(page, "idris");
-  await page.goto("/check");
+  await openPage(page, "/check");
   await page.getByText("Idris Fenwick").first().click();
   await page.getByRole("radio", { name: "Dark" }).check();
   await page.reload();
@@ -145,8 +147,7 @@ test.describe("no page is wider than its screen", () => {
         "/pack/kit-orders",
         "/pack/kit-orders/new",
       ]) {
-        await page.goto(path);
-        await expect(page.getByRole("region", { name: "Ship line" })).toContainText("ready");
+        await openPage(page, path);
         expect(await page.evaluate(() => document.documentElement.scrollWidth)).toBeLessThanOrEqual(width);
       }
     });
@@ -171,7 +172,7 @@ test("Check costs at most 150 kB of script", async ({ page }) => {
   });
   const client = await page.context().newCDPSession(page);
   await client.send("Network.setCacheDisabled", { cacheDisabled: true });
-  await page.goto("/check");
+  await openPage(page, "/check");
   await expect(page.getByRole("region", { name: "Ship line" })).toContainText("ready");
   const bytes = (await Promise.all(sizes)).reduce((sum, size) => sum + size, 0);
   expect(bytes).toBeGreaterThan(50_000);

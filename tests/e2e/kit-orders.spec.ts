@@ -1,5 +1,5 @@
 import { expect, test } from "@playwright/test";
-import { signInAs, watchForFaults } from "../support/browser-session";
+import { openPage, signInAs, watchForFaults } from "../support/browser-session";
 
 /** A serial that no other run of these tests has used. */
 const serial = () => `T${Date.now().toString(36).toUpperCase()}`;
@@ -40,7 +40,7 @@ test("the planner enters, changes and cancels a kit order", async ({ page }) => 
 
 test("what is wrong is said beside its field, and what was typed stays", async ({ page }) => {
   await signInAs(page, "idris");
-  await page.goto("/pack/kit-orders/new");
+  await openPage(page, "/pack/kit-orders/new");
   await page.getByLabel("Customer").fill("Ferry Trust of Lowmere");
   await page.getByLabel("Priority").fill("soon");
   const answered = page.waitForResponse((response) => response.request().method() === "POST");
@@ -55,7 +55,7 @@ test("what is wrong is said beside its field, and what was typed stays", async (
 
 test("nobody writes over somebody else's change", async ({ page, context }) => {
   await signInAs(page, "idris");
-  await page.goto("/pack/kit-orders/new");
+  await openPage(page, "/pack/kit-orders/new");
   await page.getByLabel("Customer").fill("First");
   await page.getByLabel("Priority").fill("9998");
   await page.getByRole("button", { name: "Enter the order" }).click();
@@ -83,8 +83,7 @@ test("nobody writes over somebody else's change", async ({ page, context }) => {
 
 test("the ship line asks again after an act", async ({ page }) => {
   await signInAs(page, "idris");
-  await page.goto("/pack/kit-orders/new");
-  await expect(page.getByRole("region", { name: "Ship line" })).toContainText("ready");
+  await openPage(page, "/pack/kit-orders/new");
   await page.getByLabel("Priority").fill("9997");
   const asked = page.waitForResponse((response) => response.url().endsWith("/api/ship-line"));
   await page.getByRole("button", { name: "Enter the order" }).click();

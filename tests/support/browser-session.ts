@@ -21,3 +21,9 @@ export function watchForFaults(page: Page): { expectNone(): void } {
   });
   return { expectNone: () => expect(faults).toEqual([]) };
 }
+
+/** Opens a page and waits until its script answers: the ship line has heard from the server. */
+export async function openPage(page: Page, path: string): Promise<void> {
+  await page.goto(path);
+  await expect(page.getByRole("region", { name: "Ship line" })).toContainText("ready", { timeout: 20_000 });
+}
