@@ -103,18 +103,21 @@ function plan(work: PlanWork, engine: Engine): ShipPlan {
   };
 }
 
-/** Each demand up to its quantity, since others are served after it; the last one as far as it goes. */
+/**
+ * Each demand up to its quantity, since others are served after it; the last one as far as it goes. Within
+ * a demand the first kit that is stopped ends the count.
+ */
 function strictBuildable(splits: readonly SplitDemand[], served: Served): (Steps | null)[] {
-  let at = 0;
+  let next = 0;
   return splits.map((split, index) => {
+    const first = next;
+    next += split.segments.length;
     let sum: Steps = 0;
-    let complete = true;
-    for (const segment of split.segments) {
-      const kits = served.shippable[at++];
-      complete &&= kits === segment.kits;
-      sum = addSteps(sum, kits);
+    for (let at = first; at < next; at++) {
+      sum = addSteps(sum, served.shippable[at]);
+      if (served.shippable[at] !== split.segments[at - first].kits) return sum;
     }
-    if (!complete || index < splits.length - 1) return sum;
+    if (index < splits.length - 1) return sum;
     const more = countBeyond(branchLane(served.lanes.now), split.beyond);
     return more === null ? null : addSteps(sum, more);
   });

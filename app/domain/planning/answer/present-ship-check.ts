@@ -7,6 +7,7 @@ import type { ShipPlan } from "../plan-ship";
 import { MAKE } from "../structure/structure";
 import type { Debt, IsoDate, Rung, ShipCheck, Shortage } from "../types";
 import { findWarnings } from "./find-warnings";
+import { sortWorstFirst } from "./sort-worst-first";
 import { sumCost } from "./sum-cost";
 
 /** The plan as the contracts of command line and HTTP give it (DESIGN.md; PLANNING.md, sections 4 and 5). */
@@ -63,18 +64,16 @@ function presentLadder({ structure, served }: ShipPlan): Rung[] {
     kits: rung.kits,
     cost: sumCost(structure, rung.short),
     readyOn: isoDate(rung.readyOn),
-    stoppers: rung.stoppers
-      .map(({ part, missing }) => ({
-        partNumber: structure.parts[part].partNumber,
-        missing: formatSteps(missing, structure.decimals[part]),
-      }))
-      .sort(byPartNumber),
+    stoppers: sortWorstFirst(structure, rung.stoppers).map(({ part, missing }) => ({
+      partNumber: structure.parts[part].partNumber,
+      missing: formatSteps(missing, structure.decimals[part]),
+    })),
   }));
 }
 
 function presentShortages(plan: ShipPlan): Shortage[] {
   const { structure, served } = plan;
-  const { before, now, coming, ready, stopsAt, needBy } = served;
+  const { before, now, coming, ready, stopsAt, needs } = served;
   const shortages: Shortage[] = [];
   for (const [part, first] of stopsAt) {
     const say = (after: Amounts, earlier: Amounts) =>
@@ -88,20 +87,16 @@ function presentShortages(plan: ShipPlan): Shortage[] {
       short: say(coming.net, before.coming.net),
       missing: say(now.net, before.now.net),
       stopsAt: Number(first),
-      needBy: needBy[part] === NEVER ? null : isoDate(needBy[part]),
-      orderBy: orderBy(plan, part),
+      needBy: dateOrNull(needs.needBy[part]),
+      orderBy: dateOrNull(needs.orderBy[part]),
       readyOn: isoDate(ready[part]),
     });
   }
   return shortages.sort(byPartNumber);
 }
 
-/** The earliest over the demands that are short of the part: today without a date (section 5). */
-function orderBy({ structure, supplies, served }: ShipPlan, part: number): IsoDate | null {
-  const days: number[] = [];
-  if (served.shortUndated[part]) days.push(supplies.today);
-  if (served.shortDated[part]) days.push(served.needBy[part] - structure.leadTime[part]);
-  return days.length > 0 ? isoDate(Math.min(...days)) : null;
+function dateOrNull(day: number): IsoDate | null {
+  return day === NEVER ? null : isoDate(day);
 }
 
 function presentBuilds({ structure, served }: ShipPlan): ShipCheck["builds"] {

@@ -2,7 +2,7 @@ import type { Steps } from "../../quantity/steps";
 import { addSteps, subtractSteps } from "../../quantity/steps";
 import type { Supplies } from "../compile-supplies";
 import { criticalChain } from "../dates/critical-chain";
-import { NEVER, needForSegment, spreadNeed } from "../dates/need-dates";
+import { addNeeds, emptyNeeds } from "../dates/need-dates";
 import { readyDates, readyForSegment } from "../dates/ready-dates";
 import type { Structure } from "../structure/structure";
 import { countShippable } from "./count-shippable";
@@ -21,6 +21,8 @@ interface Run extends Omit<Served, "now" | "coming" | "all" | "lanes"> {
   allLane: Lane;
   served: Steps;
   latest: number;
+  /** Where the demands that are alike began in the pass *coming*. */
+  groupBase: PassState;
 }
 
 export interface ServeInput {
@@ -42,11 +44,14 @@ export function serveDemands(input: ServeInput): Served {
       now: copyState(run.nowLane.state, engine),
       coming: copyState(run.comingLane.state, engine),
     };
+    run.groupBase = run.before.coming;
   }
-  for (const segment of segments) serveSegment(run, segment);
+  segments.forEach((segment, at) => {
+    serveSegment(run, segment);
+    if (segment.alike !== segments[at + 1]?.alike) closeGroup(run, segment, engine);
+  });
   const { nowLane, comingLane, allLane } = run;
   readyDates(structure, supplies, allLane.state, run.ready);
-  spreadNeed(structure, comingLane.state, run.needBy);
   return {
     ...run,
     lanes: { now: nowLane },
@@ -78,9 +83,8 @@ function openRun({ structure, supplies, first, segments, engine }: ServeInput): 
     ready: new Int32Array(parts),
     chain: [],
     stopsAt: new Map(),
-    needBy: new Int32Array(parts).fill(NEVER),
-    shortDated: new Uint8Array(parts),
-    shortUndated: new Uint8Array(parts),
+    needs: emptyNeeds(structure),
+    groupBase: nothing,
   };
 }
 
@@ -123,7 +127,6 @@ function serveSegment(run: Run, segment: Segment): void {
   const readyOn = dateSegment(run, segment);
   run.shippable.push(climbed.free);
   run.earliest.push(readyOn);
-  keepNeeds(run, segment);
   keepChain(run, segment, readyOn);
   for (const lane of lanesOf(run)) keepKits(lane, segment);
   run.latest = Math.max(run.latest, readyOn);
@@ -140,17 +143,23 @@ function climbRungs(run: Run, segment: Segment, offers: Offers): { rungs: number
     const { structure, nowLane } = run;
     if (free === kits - 1 && addsNoShortage(structure, nowLane.state, nowLane.next)) free = kits;
     const at = Number(run.served) + kits;
+    const short = lackOf(structure, run.comingLane.next, run.before.coming);
+    const readyOn = Math.max(run.latest, dateSegment(run, segment));
+    const shortOf = new Map(short.map(({ part, lack }) => [part, lack]));
     const stoppers = lackOf(structure, nowLane.next, run.before.now).map(({ part, lack }) => ({
       part,
       missing: lack,
+      readyOn: run.ready[part],
+      short: shortOf.get(part) ?? 0,
     }));
     for (const { part } of stoppers) if (!run.stopsAt.has(part)) run.stopsAt.set(part, at);
-    const short = lackOf(structure, run.comingLane.next, run.before.coming).map(({ part, lack }) => ({
-      part,
-      short: lack,
-    }));
-    const readyOn = Math.max(run.latest, dateSegment(run, segment));
-    run.rungs.push({ part: segment.part, kits: at, stoppers, short, readyOn });
+    run.rungs.push({
+      part: segment.part,
+      kits: at,
+      stoppers,
+      short: short.map(({ part, lack }) => ({ part, short: lack })),
+      readyOn,
+    });
   }
   return { rungs, free };
 }
@@ -181,14 +190,11 @@ function dateSegment(run: Run, segment: Segment): number {
   return ready[segment.part];
 }
 
-function keepNeeds(run: Run, segment: Segment): void {
-  const { structure, comingLane } = run;
-  const { state, next } = comingLane;
-  needForSegment(structure, state, next, segment, run.needBy);
-  const short = segment.due === null ? run.shortUndated : run.shortDated;
-  for (let p = 0; p < structure.leaf.length; p++) {
-    if (structure.leaf[p] && subtractSteps(next.net[p], state.net[p]) > 0) short[p] = 1;
-  }
+/** After the last of the demands that are alike: their dates, and where the next begin. */
+function closeGroup(run: Run, { part, due }: Segment, engine: Engine): void {
+  const { structure, supplies, comingLane, groupBase } = run;
+  addNeeds(structure, { part, due, base: groupBase, state: comingLane.state }, supplies.today, run.needs);
+  run.groupBase = copyState(comingLane.state, engine);
 }
 
 function keepChain(run: Run, segment: Segment, readyOn: number): void {

@@ -1,4 +1,5 @@
 import type { Steps } from "../../quantity/steps";
+import type { NeedDates } from "../dates/need-dates";
 import type { ChainLink } from "../types";
 import type { Lane } from "./lane";
 import type { PassState } from "./pass-state";
@@ -6,11 +7,19 @@ import type { PassState } from "./pass-state";
 /** Most rungs that a ladder draws. */
 export const MOST_RUNGS = 1000;
 
+/** A part that a rung lacks here and now, with its day and what is not even on order. */
+export interface Stopper {
+  part: number;
+  missing: Steps;
+  readyOn: number;
+  short: Steps;
+}
+
 /** One rung of the ladder, by part numbers of the structure. */
 export interface ServedRung {
   part: number;
   kits: number;
-  stoppers: { part: number; missing: Steps }[];
+  stoppers: Stopper[];
   /** Short in the pass *coming*. */
   short: { part: number; short: Steps }[];
   readyOn: number;
@@ -34,8 +43,5 @@ export interface Served {
   ready: Int32Array;
   chain: ChainLink[];
   stopsAt: Map<number, Steps>;
-  needBy: Int32Array;
-  /** 1 where a demand with, or without, a date is short of the part. */
-  shortDated: Uint8Array;
-  shortUndated: Uint8Array;
+  needs: NeedDates;
 }

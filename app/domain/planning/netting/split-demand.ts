@@ -17,6 +17,8 @@ export interface Segment {
   due: number | null;
   /** 1 for each conditional line that counts. */
   active: Uint8Array;
+  /** Equal for demands that ask for the same: they are one demand of the sum. */
+  alike: string;
   /** Does the line count for these kits? */
   admits: (line: PlanLine) => boolean;
 }
@@ -62,12 +64,13 @@ interface Asked {
 function cut(structure: Structure, { demand, index, part, first, today }: Asked): SplitDemand {
   const due = demand.due === null ? null : dayNumber(demand.due);
   const options = new Set(demand.options);
+  const alike = JSON.stringify([part, due, [...options].sort(), first === null ? null : index]);
   const { source } = structure.conditional;
   const segmentAt = (offset: number, kits: Steps): Segment => {
     const serial = first && { ...first, number: first.number + offset };
     const admits = (line: PlanLine) => counts(line, options, serial, due ?? today);
     const active = Uint8Array.from(source, (line) => (admits(structure.lines[line]) ? 1 : 0));
-    return { demand: index, part, kits, due, active, admits };
+    return { demand: index, part, kits, due, active, alike, admits };
   };
   const kits = requireSteps(demand.quantity, 0);
   const split: SplitDemand = { segments: [], beyond: [] };
