@@ -1,4 +1,5 @@
 import { presentShipCheck } from "~/domain/planning/answer/present-ship-check";
+import { sortWorstFirst } from "~/domain/planning/answer/sort-worst-first";
 import { sumCost } from "~/domain/planning/answer/sum-cost";
 import { countReached } from "~/domain/planning/count-reached";
 import { offeredOptions } from "~/domain/planning/netting/split-demand";
@@ -53,7 +54,7 @@ export async function getCheckAnswer(asked: Asked, person: CurrentPerson): Promi
     ...empty,
     answer: seesCosts ? answer : hideCosts(answer),
     parts,
-    stoppers: worstFirst(planned, answer),
+    stoppers: worstFirst(planned),
     totalParts: countReached(book.structure, planned.segments[0].part),
   };
 }
@@ -119,16 +120,13 @@ function costOf(plan: ShipPlan, part: number): string {
   return sumCost(plan.structure, [{ part, short: plan.served.coming.net[part] }]);
 }
 
-/** Latest day first, then the dearest, then by part number (PLANNING.md, section 4). */
-function worstFirst(plan: ShipPlan, answer: ShipCheck): string[] {
-  const rows = answer.shortages.map(({ partNumber, readyOn }) => {
-    const number = plan.structure.numberOf.get(partKey(partNumber)) as number;
-    return { partNumber, readyOn, cents: BigInt(costOf(plan, number).replace(".", "")) };
-  });
-  rows.sort((a, b) => {
-    if (a.readyOn !== b.readyOn) return a.readyOn < b.readyOn ? 1 : -1;
-    if (a.cents !== b.cents) return a.cents < b.cents ? 1 : -1;
-    return a.partNumber < b.partNumber ? -1 : 1;
-  });
-  return rows.map(({ partNumber }) => partNumber);
+/** Part numbers of all that stops kits. */
+function worstFirst({ structure, served }: ShipPlan): string[] {
+  const { stopsAt, ready, coming } = served;
+  const stoppers = [...stopsAt.keys()].map((part) => ({
+    part,
+    readyOn: ready[part],
+    short: coming.net[part],
+  }));
+  return sortWorstFirst(structure, stoppers).map(({ part }) => structure.parts[part].partNumber);
 }

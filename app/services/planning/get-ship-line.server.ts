@@ -29,16 +29,7 @@ export async function getShipLine(): Promise<ShipLineAnswer> {
 /** The orders before the first that waits lack nothing, so all that its rung lacks is its own. */
 function nextToWait(orders: OpenKitOrder[], answer: ShipCheck, waiting: number): ShipLineAnswer["next"] {
   const { number, partNumber } = orders[waiting];
-  return { kitOrder: number, partNumber, stoppers: worstFirst(answer, answer.ladder[waiting].stoppers) };
-}
-
-function worstFirst<Stopper extends { partNumber: string }>(
-  answer: ShipCheck,
-  stoppers: Stopper[],
-): Stopper[] {
-  const readyOn = new Map(answer.shortages.map((shortage) => [shortage.partNumber, shortage.readyOn]));
-  const day = (stopper: Stopper) => readyOn.get(stopper.partNumber) ?? "";
-  return [...stoppers].sort((a, b) => (day(a) < day(b) ? 1 : day(a) > day(b) ? -1 : 0));
+  return { kitOrder: number, partNumber, stoppers: answer.ladder[waiting].stoppers };
 }
 
 async function kitsShown(): Promise<number> {
