@@ -1,7 +1,7 @@
 import { z } from "zod";
 import { hasHiddenCharacter } from "./hidden-character";
 
-export const longestPartNumber = 64;
+const longestPartNumber = 64;
 
 /** A part number is text, whatever it looks like: trimmed, NFC, 1 to 64 characters, none of them hidden. */
 export const partNumber = z.string().transform((text, ctx) => {

@@ -5,7 +5,7 @@ const mostDigits = 30;
 const mostDecimals = 6;
 
 /** Says what is wrong with a text that is no plain quantity; null where it is one. */
-export function quantityFault(text: string): string | null {
+function quantityFault(text: string): string | null {
   const example = "such as 12 or 0.350";
   if (text === "") return `a quantity ${example}`;
   if (plain.test(text)) {

@@ -18,7 +18,7 @@ export type CsvTable =
   | { ok: false; problems: CsvProblem[] };
 
 /** 20 MB, the most that an import takes. */
-export const csvByteLimit = 20_000_000;
+const csvByteLimit = 20_000_000;
 
 const mostProblems = 20;
 
