@@ -35,7 +35,12 @@ function makeApplication(build: ServerBuild, publicUrl: string | undefined): Exp
   });
   application.use(compression());
   serveFiles(application);
-  application.all("/{*path}", createRequestHandler({ build, mode: "production" }));
+  // The framework asks too, and knows the public address from here alone; root middleware compares it exactly.
+  const allowedActionOrigins = publicUrl ? [new URL(publicUrl).host] : undefined;
+  application.all(
+    "/{*path}",
+    createRequestHandler({ build: { ...build, allowedActionOrigins }, mode: "production" }),
+  );
   application.use(answerError);
   return application;
 }

@@ -1,7 +1,7 @@
 import { Op } from "sequelize";
 import { SignInAttempt } from "~/db/models/people/sign-in-attempt";
+import { readRows } from "~/db/read-rows.server";
 import { AppError } from "~/utils/errors";
-import { select } from "./run-sql.server";
 import { hashSecret } from "./secret.server";
 
 const MINUTES = 15;
@@ -24,7 +24,7 @@ interface Try {
 export async function countAttempt({ account, address }: Try): Promise<number> {
   const accountKey = hashSecret(account);
   const attempt = await SignInAttempt.create({ accountKey, address, succeeded: false });
-  const [row] = await select<{
+  const [row] = await readRows<{
     ofAccount: number;
     fromAddress: number;
     waitAccount: number;

@@ -1,8 +1,8 @@
 import { Session } from "~/db/models/people/session";
+import { readRows } from "~/db/read-rows.server";
 import type { Role } from "~/schemas/people/role";
 import { readSessionId } from "~/utils/session-cookie";
 import type { CurrentPerson } from "./current-person";
-import { select } from "./run-sql.server";
 import { hashSecret } from "./secret.server";
 
 interface AskerRow {
@@ -28,7 +28,7 @@ export async function findAsker(
 }
 
 async function findByToken(token: string): Promise<CurrentPerson | null> {
-  const rows = await select<AskerRow>(
+  const rows = await readRows<AskerRow>(
     `SELECT person.id, COALESCE(person.name, api_token.name) AS name, person.email,
             CASE WHEN api_token.role IS NULL OR api_token.person_id IS NULL OR api_token.role = person_role.role
                    OR person_role.role = 'manager'
@@ -45,7 +45,7 @@ async function findByToken(token: string): Promise<CurrentPerson | null> {
 /** A session ends after 12 hours without a request, and after seven days in any case. */
 async function findBySession(id: string): Promise<CurrentPerson | null> {
   const hash = hashSecret(id);
-  const rows = await select<AskerRow>(
+  const rows = await readRows<AskerRow>(
     `SELECT person.id, person.name, person.email, person_role.role,
             session.seen_at < NOW(3) - INTERVAL 5 MINUTE AS stale
        FROM session
