@@ -109,7 +109,7 @@ describe("what holds of every answer", () => {
     });
   });
 
-  test("debts balance: what a demand took in release beyond strict is owed", () => {
+  test("a debt is above 0 and stands between two demands", () => {
     holds({ release: true, kits: 2, demands: 4, dates: false, expiry: false }, 150, (shop) => {
       const { debts } = runCore(shop);
       expect(debts).toBeDefined();
