@@ -5,7 +5,7 @@ import { KitOrderOption } from "~/db/models/orders/kit-order-option";
 import { type KitOrderInput, kitOrderSchema } from "~/schemas/kit-orders/kit-order";
 import { assertMay } from "~/services/people/assert-may.server";
 import type { CurrentPerson } from "~/services/people/current-person";
-import { readRows } from "~/services/planning/read-rows.server";
+import { readRows } from "~/db/read-rows.server";
 import { AppError } from "~/utils/errors";
 import { parseInput } from "~/utils/request-body";
 import { checkKitOrder } from "./check-kit-order.server";

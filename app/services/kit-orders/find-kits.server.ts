@@ -1,6 +1,6 @@
 import type { Transaction } from "sequelize";
 import type { OrderableKit } from "~/schemas/kit-orders/presented-kit-order";
-import { readRows } from "~/services/planning/read-rows.server";
+import { readRows } from "~/db/read-rows.server";
 
 interface Row {
   partNumber: string;
