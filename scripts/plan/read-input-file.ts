@@ -1,7 +1,7 @@
 import { existsSync } from "node:fs";
 import { open } from "node:fs/promises";
 import path from "node:path";
-import type { NamedFile } from "~/services/imports/check-plan-files";
+import type { NamedFile } from "~/services/imports/files/check-plan-files";
 import { BadInput } from "./bad-input";
 
 const mostBytes = 200_000_000;

@@ -1,6 +1,6 @@
 import type { Writable } from "node:stream";
 import { checkShip } from "~/domain/planning/check-ship";
-import { checkPlanFiles } from "~/services/imports/check-plan-files";
+import { checkPlanFiles } from "~/services/imports/files/check-plan-files";
 import { sayCsvProblem } from "~/utils/csv/say-csv-problem";
 import { BadInput } from "./bad-input";
 import { formatTable } from "./format-table";

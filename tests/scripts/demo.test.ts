@@ -10,7 +10,7 @@ import { stockKind } from "~/schemas/imports/stock";
 import { structureKind } from "~/schemas/imports/structure";
 import { suppliersKind } from "~/schemas/imports/suppliers";
 import { supplyKind } from "~/schemas/imports/supply";
-import { readImportRows } from "~/services/imports/read-import-rows";
+import { readImportRows } from "~/services/imports/files/read-import-rows";
 import { demoFiles } from "../../scripts/demo/demo-files";
 import { demoPlanInput, demoRows, demoText, depthsBelow } from "../support/demo-files";
 

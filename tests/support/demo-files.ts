@@ -1,7 +1,7 @@
 import { readFileSync } from "node:fs";
 import { fileURLToPath } from "node:url";
 import { parse } from "csv-parse/sync";
-import { checkPlanFiles } from "~/services/imports/check-plan-files";
+import { checkPlanFiles } from "~/services/imports/files/check-plan-files";
 
 const folder = new URL("../../data/demo/", import.meta.url);
 

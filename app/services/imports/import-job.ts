@@ -2,10 +2,10 @@ import type { Transaction } from "sequelize";
 import type { ImportKind } from "~/schemas/imports/import-kind";
 import type { ImportKindName } from "~/schemas/imports/import-kind-name";
 import type { Act } from "~/schemas/people/act";
+import type { ImportRow } from "~/services/imports/files/read-import-rows";
 import type { CurrentPerson } from "~/services/people/current-person";
 import type { RevisionName } from "~/services/revision/revision-name";
 import type { CsvProblem } from "~/utils/csv/csv-problem";
-import type { ImportRow } from "./read-import-rows";
 
 /** What a row would do: `before` is what is there, `after` what will be. */
 export interface Decision {

@@ -2,16 +2,16 @@ import type { Transaction } from "sequelize";
 import { readRows } from "~/db/read-rows.server";
 import { partKey } from "~/domain/planning/part-key";
 import { type KitOrderRow, kitOrdersKind } from "~/schemas/imports/kit-orders";
+import { type BookName, readPartNames } from "~/services/imports/book/read-book-names.server";
+import { runStatement } from "~/services/imports/book/run-statement.server";
+import { writeRows } from "~/services/imports/book/write-rows.server";
+import { checkKitOrders, type StoredKitOrder } from "~/services/imports/decide/check-kit-orders";
+import { decideRecords, type RecordChange } from "~/services/imports/decide/decide-records";
+import type { ImportRow } from "~/services/imports/files/read-import-rows";
 import { findKits } from "~/services/kit-orders/find-kits.server";
-import { checkKitOrders, type StoredKitOrder } from "./check-kit-orders";
-import { decideRecords, type RecordChange } from "./decide-records";
 import type { ImportContext, ImportJob, ImportPlan } from "./import-job";
 import type { ImportAnswer } from "./present-import";
-import { type BookName, readPartNames } from "./read-book-names.server";
-import type { ImportRow } from "./read-import-rows";
 import { type ImportRequest, runImport } from "./run-import.server";
-import { runStatement } from "./run-statement.server";
-import { writeRows } from "./write-rows.server";
 
 type Read = Omit<KitOrderRow, "options"> & {
   id: number;

@@ -2,12 +2,12 @@ import { createHash } from "node:crypto";
 import type { Transaction } from "sequelize";
 import { inTransaction } from "~/db/in-transaction.server";
 import { type MovementRow, movementsKind } from "~/schemas/imports/movements";
+import { type ImportRow, readImportRows } from "~/services/imports/files/read-import-rows";
 import { assertMay } from "~/services/people/assert-may.server";
 import type { CurrentPerson } from "~/services/people/current-person";
 import { postMovements } from "~/services/stock/post-movements.server";
 import { AppError } from "~/utils/errors";
 import { presentProblem } from "./present-import";
-import { type ImportRow, readImportRows } from "./read-import-rows";
 
 interface MovementsFile {
   bytes: Uint8Array;

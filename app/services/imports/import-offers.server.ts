@@ -2,18 +2,26 @@ import type { Transaction } from "sequelize";
 import { readRows } from "~/db/read-rows.server";
 import { partKey } from "~/domain/planning/part-key";
 import { type OfferRow, offersKind } from "~/schemas/imports/offers";
+import {
+  type BookName,
+  readPartNames,
+  readSupplierNames,
+} from "~/services/imports/book/read-book-names.server";
+import { trimOrNull } from "~/services/imports/book/read-part-records.server";
+import { writeRows } from "~/services/imports/book/write-rows.server";
+import {
+  decideRecords,
+  type RecordChange,
+  type StoredRecord,
+} from "~/services/imports/decide/decide-records";
+import { checkStored } from "~/services/imports/files/check-stored";
+import type { ImportRow } from "~/services/imports/files/read-import-rows";
+import { unknownPart } from "~/services/imports/files/structure-problem";
 import type { CsvProblem } from "~/utils/csv/csv-problem";
 import { trimDecimal } from "~/utils/format/trim-decimal";
-import { checkStored } from "./check-stored";
-import { decideRecords, type RecordChange, type StoredRecord } from "./decide-records";
 import type { ImportContext, ImportJob, ImportPlan } from "./import-job";
 import type { ImportAnswer } from "./present-import";
-import { type BookName, readPartNames, readSupplierNames } from "./read-book-names.server";
-import type { ImportRow } from "./read-import-rows";
-import { trimOrNull } from "./read-part-records.server";
 import { type ImportRequest, runImport } from "./run-import.server";
-import { unknownPart } from "./structure-problem";
-import { writeRows } from "./write-rows.server";
 
 type Read = Omit<OfferRow, "preferred"> & { id: number; preferred: number };
 type Names = ReadonlyMap<string, BookName>;

@@ -1,18 +1,18 @@
 import type { Transaction } from "sequelize";
 import { partKey } from "~/domain/planning/part-key";
 import { type PartRow, partsKind } from "~/schemas/imports/parts";
+import { checkChangedParts } from "~/services/imports/book/check-changed-parts.server";
+import { readPartRecords } from "~/services/imports/book/read-part-records.server";
+import { writeRows } from "~/services/imports/book/write-rows.server";
+import { decideRecords, type RecordChange } from "~/services/imports/decide/decide-records";
+import { checkParts } from "~/services/imports/files/check-parts";
+import { checkStored, checkStoredFraction } from "~/services/imports/files/check-stored";
+import { notePartNumber } from "~/services/imports/files/note-part-number";
+import type { ImportRow } from "~/services/imports/files/read-import-rows";
 import type { CsvProblem } from "~/utils/csv/csv-problem";
-import { checkChangedParts } from "./check-changed-parts.server";
-import { checkParts } from "./check-parts";
-import { checkStored, checkStoredFraction } from "./check-stored";
-import { decideRecords, type RecordChange } from "./decide-records";
 import type { ImportContext, ImportJob, ImportPlan } from "./import-job";
-import { notePartNumber } from "./note-part-number";
 import type { ImportAnswer } from "./present-import";
-import type { ImportRow } from "./read-import-rows";
-import { readPartRecords } from "./read-part-records.server";
 import { type ImportRequest, runImport } from "./run-import.server";
-import { writeRows } from "./write-rows.server";
 
 const columns = [
   "part_key",

@@ -1,16 +1,16 @@
 import { readRows } from "~/db/read-rows.server";
 import { partKey } from "~/domain/planning/part-key";
 import { type StockRow, stockKind } from "~/schemas/imports/stock";
+import { readBalances } from "~/services/imports/book/read-balances.server";
+import { readPartNames } from "~/services/imports/book/read-book-names.server";
+import { runStatement } from "~/services/imports/book/run-statement.server";
+import { writeRows } from "~/services/imports/book/write-rows.server";
+import { adjustmentOf, type BalanceGoal, planBalances } from "~/services/imports/decide/plan-balances";
+import type { ImportRow } from "~/services/imports/files/read-import-rows";
 import { postMovements } from "~/services/stock/post-movements.server";
 import type { ImportContext, ImportJob, ImportPlan } from "./import-job";
-import { adjustmentOf, type BalanceGoal, planBalances } from "./plan-balances";
 import type { ImportAnswer } from "./present-import";
-import { readBalances } from "./read-balances.server";
-import { readPartNames } from "./read-book-names.server";
-import type { ImportRow } from "./read-import-rows";
 import { type ImportRequest, runImport } from "./run-import.server";
-import { runStatement } from "./run-statement.server";
-import { writeRows } from "./write-rows.server";
 
 async function makeBins(goals: readonly BalanceGoal[], { transaction }: ImportContext): Promise<void> {
   const bins = new Map(goals.filter((goal) => goal.newBin).map((goal) => [partKey(goal.bin), goal.bin]));

@@ -2,12 +2,16 @@ import type { Transaction } from "sequelize";
 import { readRows } from "~/db/read-rows.server";
 import { partKey } from "~/domain/planning/part-key";
 import { type SupplierRow, suppliersKind } from "~/schemas/imports/suppliers";
-import { decideRecords, type RecordChange, type StoredRecord } from "./decide-records";
+import { writeRows } from "~/services/imports/book/write-rows.server";
+import {
+  decideRecords,
+  type RecordChange,
+  type StoredRecord,
+} from "~/services/imports/decide/decide-records";
+import type { ImportRow } from "~/services/imports/files/read-import-rows";
 import type { ImportContext, ImportJob, ImportPlan } from "./import-job";
 import type { ImportAnswer } from "./present-import";
-import type { ImportRow } from "./read-import-rows";
 import { type ImportRequest, runImport } from "./run-import.server";
-import { writeRows } from "./write-rows.server";
 
 type Read = SupplierRow & { id: number; supplierKey: string };
 

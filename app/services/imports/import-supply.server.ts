@@ -1,15 +1,15 @@
 import type { Transaction } from "sequelize";
 import { readRows } from "~/db/read-rows.server";
 import { type SupplyRow, supplyKind } from "~/schemas/imports/supply";
+import { readPartNames } from "~/services/imports/book/read-book-names.server";
+import { readOpenOrders } from "~/services/imports/book/read-open-orders.server";
+import { runStatement } from "~/services/imports/book/run-statement.server";
+import { writeRows } from "~/services/imports/book/write-rows.server";
+import { planSupply, type SupplyChange } from "~/services/imports/decide/plan-supply";
+import type { ImportRow } from "~/services/imports/files/read-import-rows";
 import type { ImportContext, ImportJob, ImportPlan } from "./import-job";
-import { planSupply, type SupplyChange } from "./plan-supply";
 import type { ImportAnswer } from "./present-import";
-import { readPartNames } from "./read-book-names.server";
-import type { ImportRow } from "./read-import-rows";
-import { readOpenOrders } from "./read-open-orders.server";
 import { type ImportRequest, runImport } from "./run-import.server";
-import { runStatement } from "./run-statement.server";
-import { writeRows } from "./write-rows.server";
 
 /** From whom a part is bought first, by part id. */
 async function readPreferredSuppliers(transaction: Transaction): Promise<Map<number, number>> {

@@ -1,9 +1,9 @@
+import { sameValues } from "~/services/imports/decide/same-values";
+import type { RefusedRow } from "~/services/imports/files/read-import-rows";
 import type { CsvProblem } from "~/utils/csv/csv-problem";
 import { sayCsvProblem } from "~/utils/csv/say-csv-problem";
 import type { FieldError } from "~/utils/errors";
 import type { Decision, ImportPlan } from "./import-job";
-import type { RefusedRow } from "./read-import-rows";
-import { sameValues } from "./same-values";
 
 export type ImportResult = "new" | "changed" | "same" | "refused";
 

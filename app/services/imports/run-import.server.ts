@@ -3,6 +3,7 @@ import type { Transaction } from "sequelize";
 import { inTransaction } from "~/db/in-transaction.server";
 import { readRows } from "~/db/read-rows.server";
 import { appendAuditEvent } from "~/services/audit/append-audit-event.server";
+import { readImportRows } from "~/services/imports/files/read-import-rows";
 import { assertMay } from "~/services/people/assert-may.server";
 import type { CurrentPerson } from "~/services/people/current-person";
 import { raiseRevision } from "~/services/revision/raise-revision.server";
@@ -11,7 +12,6 @@ import type { CsvProblem } from "~/utils/csv/csv-problem";
 import { AppError, type FieldError } from "~/utils/errors";
 import type { ImportJob } from "./import-job";
 import { type ImportAnswer, presentProblem, presentRows } from "./present-import";
-import { readImportRows } from "./read-import-rows";
 
 export interface ImportRequest {
   bytes: Uint8Array;

@@ -1,7 +1,7 @@
 import { beforeEach, describe, expect, test } from "vitest";
 import { inTransaction } from "~/db/in-transaction.server";
 import { shipCheckQuerySchema } from "~/schemas/planning/ship-check";
-import { readPartNames } from "~/services/imports/read-book-names.server";
+import { readPartNames } from "~/services/imports/book/read-book-names.server";
 import { getShipCheck } from "~/services/planning/get-ship-check.server";
 import { postMovements } from "~/services/stock/post-movements.server";
 import { parseInput } from "~/utils/request-body";

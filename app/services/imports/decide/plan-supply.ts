@@ -1,15 +1,15 @@
 import { partKey } from "~/domain/planning/part-key";
 import type { SupplyRow } from "~/schemas/imports/supply";
+import type { BookPart } from "~/services/imports/book/read-book-names.server";
+import type { OpenOrder, OpenOrders } from "~/services/imports/book/read-open-orders.server";
+import { checkDecimals } from "~/services/imports/files/check-decimals";
+import { checkStored } from "~/services/imports/files/check-stored";
+import type { ImportRow } from "~/services/imports/files/read-import-rows";
+import { unknownPart } from "~/services/imports/files/structure-problem";
+import type { Decision } from "~/services/imports/import-job";
 import type { CsvProblem } from "~/utils/csv/csv-problem";
-import { checkDecimals } from "./check-decimals";
-import { checkStored } from "./check-stored";
-import type { Decision } from "./import-job";
 import { missingOrderNumber } from "./missing-order-number";
-import type { BookPart } from "./read-book-names.server";
-import type { ImportRow } from "./read-import-rows";
-import type { OpenOrder, OpenOrders } from "./read-open-orders.server";
 import { sameValues } from "./same-values";
-import { unknownPart } from "./structure-problem";
 
 /** An order to make or, with an id, to change. The quantity is what is still to come. */
 export interface SupplyChange {

@@ -1,9 +1,9 @@
 import { partKey } from "~/domain/planning/part-key";
 import type { KitOrderRow } from "~/schemas/imports/kit-orders";
 import type { OrderableKit } from "~/schemas/kit-orders/presented-kit-order";
+import type { Decision } from "~/services/imports/import-job";
 import type { CsvProblem } from "~/utils/csv/csv-problem";
 import type { StoredRecord } from "./decide-records";
-import type { Decision } from "./import-job";
 import { sameValues } from "./same-values";
 
 export interface StoredKitOrder extends StoredRecord<KitOrderRow> {

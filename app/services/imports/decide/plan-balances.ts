@@ -4,14 +4,14 @@ import { requireSteps } from "~/domain/quantity/parse-steps";
 import { addSteps, type Steps, subtractSteps } from "~/domain/quantity/steps";
 import type { MovementRequest } from "~/domain/stock/types";
 import type { StockRow } from "~/schemas/imports/stock";
+import { type BookBalances, balancePlace, lotPlace } from "~/services/imports/book/read-balances.server";
+import type { BookPart } from "~/services/imports/book/read-book-names.server";
+import { checkDecimals } from "~/services/imports/files/check-decimals";
+import { checkStored } from "~/services/imports/files/check-stored";
+import type { ImportRow } from "~/services/imports/files/read-import-rows";
+import { unknownPart } from "~/services/imports/files/structure-problem";
+import type { Decision } from "~/services/imports/import-job";
 import type { CsvProblem } from "~/utils/csv/csv-problem";
-import { checkDecimals } from "./check-decimals";
-import { checkStored } from "./check-stored";
-import type { Decision } from "./import-job";
-import { type BookBalances, balancePlace, lotPlace } from "./read-balances.server";
-import type { BookPart } from "./read-book-names.server";
-import type { ImportRow } from "./read-import-rows";
-import { unknownPart } from "./structure-problem";
 
 /** Stock that is given without a bin lies here. */
 const noBin = "STORES";

@@ -3,7 +3,7 @@ import { readRows } from "~/db/read-rows.server";
 import { compileStructure } from "~/domain/planning/compile-structure";
 import { partKey } from "~/domain/planning/part-key";
 import type { PartRow } from "~/schemas/imports/parts";
-import type { RecordChange, StoredRecord } from "./decide-records";
+import type { RecordChange, StoredRecord } from "~/services/imports/decide/decide-records";
 import { readBookLines } from "./read-book-lines.server";
 
 interface PartProblem {

@@ -1,6 +1,6 @@
+import type { ImportRow } from "~/services/imports/files/read-import-rows";
+import type { Decision } from "~/services/imports/import-job";
 import type { CsvProblem } from "~/utils/csv/csv-problem";
-import type { Decision } from "./import-job";
-import type { ImportRow } from "./read-import-rows";
 import { sameValues } from "./same-values";
 
 /** A record of the book in the form of a row. */

@@ -1,8 +1,8 @@
 import type { Transaction } from "sequelize";
 import { readRows } from "~/db/read-rows.server";
 import type { PartRow } from "~/schemas/imports/parts";
+import type { StoredRecord } from "~/services/imports/decide/decide-records";
 import { trimDecimal } from "~/utils/format/trim-decimal";
-import type { StoredRecord } from "./decide-records";
 
 type Read = Omit<PartRow, "sold"> & { id: number; partKey: string; sold: number };
 
