@@ -33,7 +33,7 @@ export function CheckPage({ first }: { first: CheckPageAnswer }) {
 function Reasons({ page }: { page: CheckPageAnswer }) {
   return (
     <>
-      <div className="mt-8 grid items-start gap-x-10 gap-y-8 xl:grid-cols-[minmax(25rem,5fr)_minmax(0,9fr)]">
+      <div className="mt-8 grid items-start gap-x-10 gap-y-8 desk:grid-cols-[minmax(25rem,5fr)_minmax(0,9fr)]">
         <Ladder page={page} />
         <div className="grid min-w-0 gap-4">
           <StoppersTable page={page} />

@@ -10,27 +10,27 @@ interface StopperLineProps {
 /** One part that stops kits: a table row at a desk, a small sheet on a phone. */
 export function StopperLine({ row, asked, seesCosts }: StopperLineProps) {
   return (
-    <tr className="border-line border-b align-top max-md:grid max-md:grid-cols-3 max-md:gap-x-4 max-md:gap-y-2 max-md:py-4">
-      <th scope="row" className="text-left font-normal max-md:col-span-3 md:py-3 md:pr-4">
+    <tr className="border-line border-b align-top max-lg:grid max-lg:grid-cols-3 max-lg:gap-x-4 max-lg:gap-y-2 max-lg:py-4">
+      <th scope="row" className="text-left font-normal max-lg:col-span-3 lg:py-3 lg:pr-4">
         <span className="figure block font-semibold">{row.partNumber}</span>
         <span className="block text-[0.9375rem] text-soft leading-snug">{row.description}</span>
         {row.supplier !== null && (
           <span className="block text-[0.9375rem] text-soft leading-snug">{row.supplier}</span>
         )}
       </th>
-      <td className="max-md:col-span-3 md:pt-[1.15rem] md:pr-4 md:pb-3">
+      <td className="max-lg:col-span-3 lg:pt-[1.15rem] lg:pr-4 lg:pb-3">
         <KitsCovered stopsAt={row.stopsAt} asked={asked} />
       </td>
       <Figure label="Missing" value={row.missing} />
       <Figure label="On order" value={row.onOrder} />
       <Figure label="Short" value={row.short} isStop={row.isShort} />
-      <td className="text-soft max-md:sr-only md:py-3 md:pr-4">{row.unit === "" ? "each" : row.unit}</td>
-      <td className="figure whitespace-nowrap md:py-3 md:pr-4 md:text-right">
+      <td className="text-soft max-lg:sr-only lg:py-3 lg:pr-4">{row.unit === "" ? "each" : row.unit}</td>
+      <td className="figure whitespace-nowrap lg:py-3 lg:pr-4 lg:text-right">
         <Label text="Here on" />
         <time dateTime={row.hereOnIso}>{row.hereOn}</time>
       </td>
       {seesCosts && (
-        <td className="figure max-md:col-span-2 md:py-3 md:text-right">
+        <td className="figure max-lg:col-span-2 lg:py-3 lg:text-right">
           <Label text="Cost" />
           {row.cost ?? <span className="text-soft">no price</span>}
         </td>
@@ -41,7 +41,7 @@ export function StopperLine({ row, asked, seesCosts }: StopperLineProps) {
 
 function Figure({ label, value, isStop = false }: { label: string; value: string; isStop?: boolean }) {
   return (
-    <td className={`figure md:py-3 md:pr-4 md:text-right ${isStop ? "font-semibold text-stop" : ""}`}>
+    <td className={`figure lg:py-3 lg:pr-4 lg:text-right ${isStop ? "font-semibold text-stop" : ""}`}>
       <Label text={label} />
       {value}
     </td>
@@ -51,7 +51,7 @@ function Figure({ label, value, isStop = false }: { label: string; value: string
 /** The column's name where the table has come apart into sheets; readers hear it from the header. */
 function Label({ text }: { text: string }) {
   return (
-    <span aria-hidden="true" className="block font-normal font-sans text-[0.9375rem] text-soft md:hidden">
+    <span aria-hidden="true" className="block font-normal font-sans text-[0.9375rem] text-soft lg:hidden">
       {text}
     </span>
   );

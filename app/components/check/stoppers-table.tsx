@@ -23,8 +23,8 @@ export function StoppersTable({ page }: { page: CheckPageAnswer }) {
         <p className="text-soft">{countWords(rows.length, page.totalParts)}</p>
       </div>
       {rows.length > 0 && (
-        <table aria-labelledby="stoppers-title" className="mt-2 w-full max-md:block">
-          <thead className="max-md:sr-only">
+        <table aria-labelledby="stoppers-title" className="mt-2 w-full max-lg:block">
+          <thead className="max-lg:sr-only">
             <tr className="border-ink border-b-2 text-left align-bottom text-[0.9375rem]">
               {heads.map((head, place) => (
                 <th
@@ -37,7 +37,7 @@ export function StoppersTable({ page }: { page: CheckPageAnswer }) {
               ))}
             </tr>
           </thead>
-          <tbody className="max-md:block">
+          <tbody className="max-lg:block">
             {shown.map((row) => (
               <StopperLine
                 key={row.partNumber}

@@ -101,7 +101,7 @@ function Cell({ label, value, empty }: { label: string; value: string | null; em
 /** The column's name where the table has come apart; readers hear it from the header. */
 function Label({ text }: { text: string }) {
   return (
-    <span aria-hidden="true" className="mr-2 font-sans text-[0.9375rem] text-soft md:hidden">
+    <span aria-hidden="true" className="block font-sans text-[0.9375rem] text-soft md:hidden">
       {text}
     </span>
   );

@@ -62,7 +62,7 @@ export interface CheckKit {
 /** Everything the page Check shows. Served by the page's loader and by `GET /api/check-answer`. */
 export interface CheckPageAnswer {
   question: CheckQuestion;
-  /** Null when there is nothing to answer: no kits yet, or `problem` says why. */
+  /** Null when there is nothing to answer: no kits yet, or `problem` says why. Its ladder holds the rungs that are drawn. */
   answer: ShipCheck | null;
   /** A sentence: which kit or option is not there, and what to do. */
   problem: string | null;

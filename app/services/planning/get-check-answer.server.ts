@@ -2,6 +2,7 @@ import { presentShipCheck } from "~/domain/planning/answer/present-ship-check";
 import { sortWorstFirst } from "~/domain/planning/answer/sort-worst-first";
 import { sumCost } from "~/domain/planning/answer/sum-cost";
 import { countReached } from "~/domain/planning/count-reached";
+import { keepDrawnRungs } from "~/domain/planning/ladder-runs";
 import { offeredOptions } from "~/domain/planning/netting/split-demand";
 import { partKey } from "~/domain/planning/part-key";
 import type { ShipPlan } from "~/domain/planning/plan-ship";
@@ -49,10 +50,11 @@ export async function getCheckAnswer(asked: Asked, person: CurrentPerson): Promi
   const planned = tryPlan(book, question);
   if (typeof planned === "string") return { ...empty, problem: planned };
   const answer = presentShipCheck(planned);
+  const drawn = { ...answer, ladder: keepDrawnRungs(answer.ladder) };
   const parts = presentParts(book, planned, answer, seesCosts);
   return {
     ...empty,
-    answer: seesCosts ? answer : hideCosts(answer),
+    answer: seesCosts ? drawn : hideCosts(drawn),
     parts,
     stoppers: worstFirst(planned),
     totalParts: countReached(book.structure, planned.segments[0].part),

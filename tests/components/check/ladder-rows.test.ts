@@ -1,12 +1,14 @@
 import fc from "fast-check";
 import { describe, expect, test } from "vitest";
 import { ladderRows } from "~/components/check/ladder-rows";
+import { keepDrawnRungs } from "~/domain/planning/ladder-runs";
+import type { Rung } from "~/domain/planning/types";
 import { buildCheckAnswer } from "../../support/build-check-answer";
 
-function rowsOf(quantity: number, stopsAt: number[]) {
+function rowsOf(quantity: number, stopsAt: number[], keep = (ladder: Rung[]) => ladder) {
   const scarce = stopsAt.map((kit, place) => ({ partNumber: `P-${place}`, stopsAt: kit, perKit: 1 }));
   const page = buildCheckAnswer({ quantity, scarce });
-  return ladderRows(page.answer?.ladder ?? [], page.stoppers);
+  return ladderRows(keep(page.answer?.ladder ?? []), page.stoppers);
 }
 
 describe("the rows of the ladder", () => {
@@ -50,6 +52,7 @@ describe("the rows of the ladder", () => {
             expect(rows[place].from).toBe(rows[place - 1].to + 1);
           const fresh = rows.flatMap((row) => row.fresh.map((one) => one.partNumber));
           expect(fresh).toHaveLength(new Set(fresh).size);
+          expect(rowsOf(quantity, stopsAt, keepDrawnRungs)).toEqual(rows);
           expect(fresh).toHaveLength(stopsAt.filter((kit) => kit <= quantity).length);
         },
       ),
