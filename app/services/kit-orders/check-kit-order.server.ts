@@ -1,7 +1,7 @@
 import type { Transaction } from "sequelize";
+import { readRows } from "~/db/read-rows.server";
 import { partKey } from "~/domain/planning/part-key";
 import type { KitOrderInput } from "~/schemas/kit-orders/kit-order";
-import { readRows } from "~/db/read-rows.server";
 import { AppError, type FieldError } from "~/utils/errors";
 import { findKits } from "./find-kits.server";
 

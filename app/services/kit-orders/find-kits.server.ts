@@ -1,6 +1,6 @@
 import type { Transaction } from "sequelize";
-import type { OrderableKit } from "~/schemas/kit-orders/presented-kit-order";
 import { readRows } from "~/db/read-rows.server";
+import type { OrderableKit } from "~/schemas/kit-orders/presented-kit-order";
 
 interface Row {
   partNumber: string;

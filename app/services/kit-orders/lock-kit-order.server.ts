@@ -1,6 +1,6 @@
 import type { Transaction } from "sequelize";
-import type { PresentedKitOrder } from "~/schemas/kit-orders/presented-kit-order";
 import { readRows } from "~/db/read-rows.server";
+import type { PresentedKitOrder } from "~/schemas/kit-orders/presented-kit-order";
 import { AppError } from "~/utils/errors";
 import { SELECT_KIT_ORDERS } from "./kit-order-columns";
 import { type KitOrderRow, presentKitOrder } from "./present-kit-order";
