@@ -1,4 +1,4 @@
-import { existsSync, readdirSync, renameSync, rmSync } from "node:fs";
+import { existsSync, readdirSync, renameSync, rmSync, writeFileSync } from "node:fs";
 import os from "node:os";
 import path from "node:path";
 import { findProgram } from "../bootstrap/debian-packages.mjs";
@@ -24,7 +24,15 @@ export async function makeDataFolder(folder: DatabaseFolder): Promise<void> {
     setAside(folder.data);
   }
   const making = `${folder.data}.making-${process.pid}`;
-  await install(making);
+  const log = path.join(folder.folder, "install.log");
+  if (!(await install(making, log))) {
+    say("Making the database did not work at the first try; trying once more");
+    if (!(await install(making, log))) {
+      throw new StopSentence(
+        `The database could not be made: ${log} says why. Start again once that is mended.`,
+      );
+    }
+  }
   renameSync(making, folder.data);
 }
 
@@ -38,7 +46,8 @@ function setAside(data: string): void {
   say(`The database folder was not whole; it is kept as ${aside}, and a new one is made`);
 }
 
-async function install(data: string): Promise<void> {
+/** One try; false leaves nothing behind but what the installer said. */
+async function install(data: string, log: string): Promise<boolean> {
   const program = findProgram("mariadb-install-db");
   if (!program)
     throw new StopSentence(
@@ -62,7 +71,8 @@ async function install(data: string): Promise<void> {
       env: { ...process.env, PATH: `${process.env.PATH}:/usr/sbin:/sbin` },
     },
   );
-  if (code === 0) return;
+  if (code === 0) return true;
+  writeFileSync(log, output);
   rmSync(data, { recursive: true, force: true });
-  throw new StopSentence(`The database could not be made: ${output.trim().split("\n").slice(-3).join(" ")}`);
+  return false;
 }
