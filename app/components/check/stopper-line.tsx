@@ -9,21 +9,22 @@ interface StopperLineProps {
 
 /** One part that stops kits: a table row at a desk, a small sheet on a phone. */
 export function StopperLine({ row, asked, seesCosts }: StopperLineProps) {
+  const unit = row.unit === "" ? "" : `, ${row.unit}`;
   return (
-    <tr className="border-line border-b align-top max-lg:grid max-lg:grid-cols-3 max-lg:gap-x-4 max-lg:gap-y-2 max-lg:py-4">
-      <th scope="row" className="text-left font-normal max-lg:col-span-3 lg:py-3 lg:pr-4">
+    <tr className="border-line border-b align-top max-lg:grid max-lg:grid-cols-3 sm:max-lg:grid-cols-6 max-lg:gap-x-4 max-lg:gap-y-2 max-lg:py-4">
+      <th scope="row" className="text-left font-normal max-lg:col-span-full lg:py-3 lg:pr-4">
         <span className="figure block font-semibold">{row.partNumber}</span>
         <span className="block text-[0.9375rem] text-soft leading-snug">{row.description}</span>
         {row.supplier !== null && (
           <span className="block text-[0.9375rem] text-soft leading-snug">{row.supplier}</span>
         )}
       </th>
-      <td className="max-lg:col-span-3 lg:pt-[1.15rem] lg:pr-4 lg:pb-3">
+      <td className="max-lg:col-span-full lg:pt-[1.15rem] lg:pr-4 lg:pb-3">
         <KitsCovered stopsAt={row.stopsAt} asked={asked} />
       </td>
-      <Figure label="Missing" value={row.missing} />
-      <Figure label="On order" value={row.onOrder} />
-      <Figure label="Short" value={row.short} isStop={row.isShort} />
+      <Figure label={`Missing${unit}`} value={row.missing} />
+      <Figure label={`On order${unit}`} value={row.onOrder} />
+      <Figure label={`Short${unit}`} value={row.short} isStop={row.isShort} />
       <td className="text-soft max-lg:sr-only lg:py-3 lg:pr-4">{row.unit === "" ? "each" : row.unit}</td>
       <td className="figure whitespace-nowrap lg:py-3 lg:pr-4 lg:text-right">
         <Label text="Here on" />

@@ -51,7 +51,7 @@ function KitOrderLine({
   today: string;
 }) {
   return (
-    <tr className="border-line border-b align-top max-md:grid max-md:grid-cols-2 max-md:gap-x-4 max-md:py-3">
+    <tr className="border-line border-b align-top max-md:grid max-md:grid-cols-2 max-md:gap-x-4 max-md:gap-y-2 max-md:py-4">
       <th scope="row" className="figure whitespace-nowrap text-left font-semibold md:py-3 md:pr-4">
         {isEditable ? (
           <Link
