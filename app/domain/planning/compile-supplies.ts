@@ -39,19 +39,24 @@ export function compileSupplies(
     orders: emptyPool(),
     wide: false,
   };
-  for (const row of stock) {
+  for (const [at, row] of stock.entries()) {
     const part = find(row.partNumber);
     if (part === undefined) continue;
     const quantity = requireSteps(row.quantity, structure.decimals[part]);
     const until = row.expiresOn === null ? Number.POSITIVE_INFINITY : dayNumber(row.expiresOn);
-    addRow(compiled.stockNow, part, { day: until, quantity, flag: null });
-    if (!row.nowOnly) addRow(compiled.stockComing, part, { day: until, quantity, flag: null });
+    const bucket: Bucket = { day: until, quantity, flag: null, row: at };
+    addRow(compiled.stockNow, part, bucket);
+    if (!row.nowOnly) addRow(compiled.stockComing, part, bucket);
   }
-  for (const row of orders) {
+  for (const [at, row] of orders.entries()) {
     const part = find(row.partNumber);
     if (part === undefined) continue;
     const quantity = requireSteps(row.quantity, structure.decimals[part]);
-    addRow(compiled.orders, part, { ...countsFrom(row.due, day, structure.leadTime[part]), quantity });
+    addRow(compiled.orders, part, {
+      ...countsFrom(row.due, day, structure.leadTime[part]),
+      quantity,
+      row: at,
+    });
   }
   dropEndless(compiled.stockNow);
   dropEndless(compiled.stockComing);
@@ -67,7 +72,7 @@ function emptyPool(): Pool {
   return { totals: new Map(), buckets: new Map() };
 }
 
-function countsFrom(due: IsoDate | null, today: number, leadTime: number): Omit<Bucket, "quantity"> {
+function countsFrom(due: IsoDate | null, today: number, leadTime: number): Omit<Bucket, "quantity" | "row"> {
   if (due === null) return { day: today + leadTime, flag: "undated" };
   const day = dayNumber(due);
   return day < today ? { day: today + leadTime, flag: "overdue" } : { day, flag: null };

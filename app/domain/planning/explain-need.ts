@@ -1,47 +1,78 @@
-import { formatSteps } from "../quantity/format-steps";
-import type { Steps } from "../quantity/steps";
-import { addSteps } from "../quantity/steps";
+import { type Steps, subtractSteps } from "../quantity/steps";
 import { lineNeed } from "./netting/line-need";
 import type { PassState } from "./netting/pass-state";
-import type { Structure } from "./structure/structure";
-import type { Causes } from "./types";
+import type { QuantityLines, Structure } from "./structure/structure";
+
+/** What one line asks of its component in a pass, on top of what was asked before. Whole steps. */
+export interface LineCause {
+  /** Index into the structure's lines. */
+  line: number;
+  parent: number;
+  component: number;
+  /** What of the parent goes through the line: started, or passed on by a phantom. */
+  through: Steps;
+  need: Steps;
+  /** The sum did not come out even. */
+  isRounded: boolean;
+}
+
+/** Why a part is needed. The needs of the causes and what is asked directly add up to `gross`. */
+interface Need {
+  gross: Steps;
+  /** By demands on the part itself. */
+  asked: Steps;
+  causes: LineCause[];
+}
 
 /**
- * Why a part is needed in a pass: the parents that are started and how much each asks for, and what is
- * asked for directly. The quantities add up to `gross`. Parents in the order of the structure.
+ * Why a pass needs a part: every line that asks for it, in the order of the structure, and what is asked
+ * for directly. `base` is what was served before the kits asked about.
  */
-export function explainNeed(structure: Structure, state: PassState, part: number): Causes {
-  const say = (steps: Steps) => formatSteps(steps, structure.decimals[part]);
-  const byParent = new Map<number, Steps>();
-  for (const { parent, need } of linesInto(structure, state, part)) {
-    byParent.set(parent, addSteps(byParent.get(parent) ?? 0, need));
+export function explainNeed(structure: Structure, state: PassState, base: PassState, part: number): Need {
+  const causes: LineCause[] = [];
+  for (let parent = 0; parent < part; parent++) {
+    if (!(state.start[parent] > 0)) continue;
+    for (const cause of linesOf(structure, state, base, parent)) {
+      if (cause.component === part) causes.push(cause);
+    }
   }
-  const asked = state.asked.get(part) ?? 0;
   return {
-    partNumber: structure.parts[part].partNumber,
-    gross: say(state.gross[part]),
-    parents: [...byParent].map(([parent, need]) => ({
-      partNumber: structure.parts[parent].partNumber,
-      quantity: say(need),
-    })),
-    asked: say(asked),
+    gross: subtractSteps(state.gross[part], base.gross[part]),
+    asked: subtractSteps(state.asked.get(part) ?? 0, base.asked.get(part) ?? 0),
+    causes,
   };
 }
 
-function linesInto(structure: Structure, state: PassState, part: number): { parent: number; need: Steps }[] {
+/** What a part that is started asks of each of its components in a pass, on top of `base`. */
+export function explainStart(
+  structure: Structure,
+  state: PassState,
+  base: PassState,
+  part: number,
+): LineCause[] {
+  return state.start[part] > 0 ? linesOf(structure, state, base, part) : [];
+}
+
+function linesOf(structure: Structure, state: PassState, base: PassState, parent: number): LineCause[] {
   const { fixed, conditional } = structure;
-  const found: { parent: number; need: Steps }[] = [];
-  const keep = (parent: number, need: Steps) => {
-    if (need > 0) found.push({ parent, need });
+  const found: LineCause[] = [];
+  const add = (lines: QuantityLines, at: number, after: Steps, before: Steps) => {
+    const need = subtractSteps(lineNeed(lines, at, after), lineNeed(lines, at, before));
+    if (!(need > 0)) return;
+    const through = subtractSteps(after, before);
+    const isRounded = !comesOutEven(lines, at, through, need);
+    found.push({ line: lines.source[at], parent, component: lines.component[at], through, need, isRounded });
   };
-  for (let parent = 0; parent < part; parent++) {
-    if (!(state.start[parent] > 0)) continue;
-    for (let k = fixed.starts[parent]; k < fixed.starts[parent + 1]; k++) {
-      if (fixed.component[k] === part) keep(parent, lineNeed(fixed, k, state.start[parent]));
-    }
-    for (let k = conditional.starts[parent]; k < conditional.starts[parent + 1]; k++) {
-      if (conditional.component[k] === part) keep(parent, lineNeed(conditional, k, state.throughLine[k]));
-    }
-  }
+  eachLine(fixed, parent, (at) => add(fixed, at, state.start[parent], base.start[parent]));
+  eachLine(conditional, parent, (at) => add(conditional, at, state.throughLine[at], base.throughLine[at]));
   return found;
+}
+
+function eachLine(lines: QuantityLines, parent: number, visit: (at: number) => void): void {
+  for (let at = lines.starts[parent]; at < lines.starts[parent + 1]; at++) visit(at);
+}
+
+function comesOutEven(lines: QuantityLines, at: number, through: Steps, need: Steps): boolean {
+  const { num, den } = lines.wide.get(at) ?? { num: BigInt(lines.num[at]), den: BigInt(lines.den[at]) };
+  return BigInt(through) * num === BigInt(need) * den;
 }

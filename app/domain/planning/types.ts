@@ -168,12 +168,3 @@ export interface Debt {
   from: number;
   to: number;
 }
-
-/** Why a part is needed: the parents that ask for it and how much, and demands on the part itself. */
-export interface Causes {
-  partNumber: string;
-  gross: DecimalString;
-  parents: { partNumber: string; quantity: DecimalString }[];
-  /** Asked for directly, by a demand on the part itself. */
-  asked: DecimalString;
-}

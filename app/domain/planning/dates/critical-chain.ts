@@ -17,12 +17,12 @@ interface ChainInput {
 }
 
 /**
- * From the kit down along the component that sets the date. Where several set it, the one with the
+ * From the kit, or another part, down along the component that sets the date. Where several set it, the one with the
  * smallest part number; where a part has several sources of one day: build, buy, on order, stock.
  */
-export function criticalChain(input: ChainInput): ChainLink[] {
+export function criticalChain(input: ChainInput, from = input.segment.part): ChainLink[] {
   const chain: ChainLink[] = [];
-  let part: number | null = input.segment.part;
+  let part: number | null = from;
   while (part !== null) {
     const { why, next } = step(input, part);
     const { partNumber } = input.structure.parts[part];

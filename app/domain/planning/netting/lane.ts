@@ -4,7 +4,7 @@ import { kitSteps } from "../structure/structure";
 import type { Amounts, Engine, PassState } from "./pass-state";
 import { copyState, emptyState } from "./pass-state";
 import type { Left, Pool } from "./pool";
-import { available, fullBuckets, takeFrom } from "./pool";
+import { available, copyLeft, fullBuckets, takeFrom } from "./pool";
 import type { Segment } from "./split-demand";
 
 /** A number left the range in which doubles are exact: plan again in BigInt. */
@@ -49,11 +49,10 @@ export function openLane(input: LaneInput): Lane {
 
 /** A lane that goes on from here by itself: what it serves is not served in the other. */
 export function branchLane(lane: Lane): Lane {
-  const copy = (left: Left): Left => new Map([...left].map(([part, quantities]) => [part, [...quantities]]));
   return {
     ...lane,
-    stockLeft: copy(lane.stockLeft),
-    ordersLeft: copy(lane.ordersLeft),
+    stockLeft: copyLeft(lane.stockLeft),
+    ordersLeft: copyLeft(lane.ordersLeft),
     state: copyState(lane.state, lane.engine),
     next: emptyState(lane.structure, lane.engine),
   };

@@ -7,6 +7,8 @@ export interface Bucket {
   day: number;
   quantity: Steps;
   flag: "overdue" | "undated" | null;
+  /** Index of the row it was made of. */
+  row: number;
 }
 
 /** Stock or open orders of all parts: totals, and the buckets of those parts for which the day matters. */
@@ -29,6 +31,11 @@ export function fullBuckets(pool: Pool): Left {
       buckets.map((bucket) => bucket.quantity),
     );
   return left;
+}
+
+/** What is left, apart from what is taken later. */
+export function copyLeft(left: Left): Left {
+  return new Map([...left].map(([part, quantities]) => [part, [...quantities]]));
 }
 
 /** What the next demand may take, by part: only buckets whose day it admits. */

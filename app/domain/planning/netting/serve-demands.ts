@@ -10,10 +10,11 @@ import { findFirstStops } from "./find-first-stops";
 import type { Lane, Offer } from "./lane";
 import { addsNoShortage, keepKits, offerTo, openLane, tryKits } from "./lane";
 import { copyState, type Engine, emptyState, type PassState } from "./pass-state";
-import { MOST_RUNGS, type Served } from "./served";
+import { copyLeft, type Left } from "./pool";
+import { type LeftOver, MOST_RUNGS, type Served } from "./served";
 import type { Segment } from "./split-demand";
 
-interface Run extends Omit<Served, "now" | "coming" | "all" | "lanes"> {
+interface Run extends Omit<Served, "now" | "coming" | "all" | "lanes" | "left"> {
   structure: Structure;
   supplies: Supplies;
   nowLane: Lane;
@@ -46,6 +47,7 @@ export function serveDemands(input: ServeInput): Served {
     };
     run.groupBase = run.before.coming;
   }
+  const before = leftOver(run, copyLeft);
   segments.forEach((segment, at) => {
     serveSegment(run, segment);
     if (segment.alike !== segments[at + 1]?.alike) closeGroup(run, segment, engine);
@@ -55,9 +57,18 @@ export function serveDemands(input: ServeInput): Served {
   return {
     ...run,
     lanes: { now: nowLane },
+    left: { before, after: leftOver(run, (left) => left) },
     now: nowLane.state,
     coming: comingLane.state,
     all: allLane.state,
+  };
+}
+
+function leftOver({ nowLane, comingLane }: Run, as: (left: Left) => Left): LeftOver {
+  return {
+    now: as(nowLane.stockLeft),
+    coming: as(comingLane.stockLeft),
+    orders: as(comingLane.ordersLeft),
   };
 }
 

@@ -3,6 +3,7 @@ import type { NeedDates } from "../dates/need-dates";
 import type { ChainLink } from "../types";
 import type { Lane } from "./lane";
 import type { PassState } from "./pass-state";
+import type { Left } from "./pool";
 
 /** Most rungs that a ladder draws. */
 export const MOST_RUNGS = 1000;
@@ -25,10 +26,19 @@ export interface ServedRung {
   readyOn: number;
 }
 
+/** Left in each bucket: stock of the pass *now*, stock and open orders of the pass *coming*. */
+export interface LeftOver {
+  now: Left;
+  coming: Left;
+  orders: Left;
+}
+
 /** Everything the answer is made of, after all demands are served. */
 export interface Served {
   /** Where the kits asked for begin: what was served before them, nothing by default. */
   before: { now: PassState; coming: PassState };
+  /** What is left of stock and open orders, bucket by bucket: before the kits asked for, and after them. */
+  left: { before: LeftOver; after: LeftOver };
   now: PassState;
   /** Open orders by the demands' dates. */
   coming: PassState;
