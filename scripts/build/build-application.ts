@@ -5,9 +5,10 @@ import { runCommand } from "../bootstrap/run-command.mjs";
 import { say } from "../bootstrap/say.mjs";
 import { StopSentence } from "../bootstrap/stop-sentence.mjs";
 import { waitForLock } from "../database/process-lock";
+import { isServed } from "./serving-marks";
 import { sourceHash } from "./source-hash";
 
-/** As many builds are kept; the others are older ones that nobody serves any more. */
+/** As many builds are kept, and older ones that are still served. */
 const kept = 4;
 
 /**
@@ -54,5 +55,7 @@ function removeOldBuilds(builds: string): void {
     .map((name) => path.join(builds, name))
     .filter((folder) => existsSync(path.join(folder, "complete")))
     .sort((a, b) => statSync(b).mtimeMs - statSync(a).mtimeMs);
-  for (const folder of folders.slice(kept)) rmSync(folder, { recursive: true, force: true });
+  for (const folder of folders.slice(kept)) {
+    if (!isServed(folder)) rmSync(folder, { recursive: true, force: true });
+  }
 }

@@ -2,8 +2,10 @@ import { type ChildProcess, spawn } from "node:child_process";
 import path from "node:path";
 import { projectRoot } from "../bootstrap/project-root.mjs";
 import { StopSentence } from "../bootstrap/stop-sentence.mjs";
+import { markServed } from "../build/serving-marks";
 
 export interface WebProcess {
+  pid: number | undefined;
   /** It listens. */
   ready: Promise<void>;
   /** Ends when the process does. */
@@ -14,7 +16,9 @@ export interface WebProcess {
 
 /** Serves a build. */
 export function startWebProcess(build: string, env: NodeJS.ProcessEnv): WebProcess {
-  return launch([path.join(build, "serve.js")], { NODE_ENV: "production", ...env }, "ipc");
+  const web = launch([path.join(build, "serve.js")], { NODE_ENV: "production", ...env }, "ipc");
+  markServed(build, web.pid);
+  return web;
 }
 
 /** Serves the sources as they are, and again whenever they change. */
@@ -45,7 +49,7 @@ function launch(words: string[], env: NodeJS.ProcessEnv, channel: "ipc" | "ignor
   });
   const ready = channel === "ipc" ? hearsReady(child, ended) : Promise.resolve();
   ready.catch(() => {});
-  return { ready, ended, stop: (patience = 7_500) => stop(child, ended, patience) };
+  return { pid: child.pid, ready, ended, stop: (patience = 7_500) => stop(child, ended, patience) };
 }
 
 async function stop(child: ChildProcess, ended: Promise<number>, patience: number): Promise<void> {
