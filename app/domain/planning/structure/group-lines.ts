@@ -1,27 +1,46 @@
 import type { PlanLine } from "../types";
 import { lineRatio } from "./line-ratio";
-import type { LineGroup, QuantityLines, Ratio } from "./structure";
+import type { ReadLines } from "./read-lines";
+import { AS_REQUIRED, CONDITIONAL } from "./read-lines";
+import type { LineGroup, QuantityLines, Ratio, Structure } from "./structure";
 
-/** The chosen input lines with the numbers of their parts. */
-export interface ChosenLines {
-  /** Indexes into the input lines, in input order. */
-  chosen: Int32Array;
-  parent: Int32Array;
-  component: Int32Array;
+type Groups = Pick<Structure, "fixed" | "conditional" | "asRequired">;
+
+/** Lines by kind and parent number, with each one's ratio; within a parent they keep the order of the input. */
+export function groupByKind(read: ReadLines, lines: readonly PlanLine[], decimals: Uint8Array): Groups {
+  const parts = decimals.length;
+  const groupOf = (isOfKind: (kind: number) => boolean) =>
+    groupLines(parts, read, choose(read.kind, isOfKind));
+  const ratios = (group: LineGroup) => addRatios(group, read, lines, decimals);
+  return {
+    fixed: ratios(groupOf((kind) => kind === 0)),
+    conditional: ratios(groupOf((kind) => kind === CONDITIONAL)),
+    asRequired: groupOf((kind) => (kind & AS_REQUIRED) !== 0),
+  };
 }
 
-/** Groups lines by parent number; within a parent they keep the order of the input. */
-export function groupLines(parts: number, { chosen, parent, component }: ChosenLines): LineGroup {
+function choose(kind: Uint8Array, isOfKind: (kind: number) => boolean): Int32Array {
+  const isChosen = Uint8Array.of(0, 1, 2, 3).map((one) => (isOfKind(one) ? 1 : 0));
+  let count = 0;
+  for (let line = 0; line < kind.length; line++) count += isChosen[kind[line]];
+  const chosen = new Int32Array(count);
+  let filled = 0;
+  for (let line = 0; line < kind.length; line++) if (isChosen[kind[line]] === 1) chosen[filled++] = line;
+  return chosen;
+}
+
+function groupLines(parts: number, { parent, component }: ReadLines, chosen: Int32Array): LineGroup {
   const starts = new Int32Array(parts + 1);
-  for (const line of chosen) starts[parent[line] + 1]++;
+  for (let k = 0; k < chosen.length; k++) starts[parent[chosen[k]] + 1]++;
   for (let p = 0; p < parts; p++) starts[p + 1] += starts[p];
   const next = starts.slice(0, parts);
-  const group: LineGroup = {
+  const group = {
     starts,
     component: new Int32Array(chosen.length),
     source: new Int32Array(chosen.length),
   };
-  for (const line of chosen) {
+  for (let k = 0; k < chosen.length; k++) {
+    const line = chosen[k];
     const at = next[parent[line]]++;
     group.component[at] = component[line];
     group.source[at] = line;
@@ -29,32 +48,23 @@ export function groupLines(parts: number, { chosen, parent, component }: ChosenL
   return group;
 }
 
-/** Groups lines with a quantity and works out each one's ratio. */
-export function groupQuantityLines(
-  chosenLines: ChosenLines,
+function addRatios(
+  group: LineGroup,
+  { parent, pieces }: ReadLines,
   lines: readonly PlanLine[],
   decimals: Uint8Array,
 ): QuantityLines {
-  const group = groupLines(decimals.length, chosenLines);
-  const num = new Float64Array(group.source.length);
-  const den = new Float64Array(group.source.length);
+  const { source, component } = group;
+  const num = new Float64Array(source.length);
+  const den = new Float64Array(source.length).fill(1);
   const wide = new Map<number, Ratio>();
   const known = new Map<string, Ratio>();
-  for (let parent = 0; parent < decimals.length; parent++) {
-    for (let at = group.starts[parent]; at < group.starts[parent + 1]; at++) {
-      const line = lines[group.source[at]];
-      const small = smallWhole(line, decimals[group.component[at]], decimals[parent]);
-      if (small >= 0) {
-        num[at] = small;
-        den[at] = 1;
-        continue;
-      }
-      storeRatio(
-        { num, den, wide },
-        at,
-        ratioOf(line, decimals[group.component[at]], decimals[parent], known),
-      );
-    }
+  for (let at = 0; at < source.length; at++) {
+    const line = source[at];
+    num[at] = pieces[line];
+    if (pieces[line] >= 0) continue;
+    const ratio = ratioOf(lines[line], decimals[component[at]], decimals[parent[line]], known);
+    storeRatio({ num, den, wide }, at, ratio);
   }
   return { ...group, num, den, wide };
 }
@@ -69,15 +79,6 @@ export function storeRatio(
   into.num[at] = exact ? Number(ratio.num) : Number.POSITIVE_INFINITY;
   into.den[at] = exact ? Number(ratio.den) : 1;
   if (!exact) into.wide.set(at, ratio);
-}
-
-/** Most lines take a few whole pieces without scrap: no need for a ratio. -1 where that is not so. */
-function smallWhole(line: PlanLine, componentDecimals: number, parentDecimals: number): number {
-  if (componentDecimals !== 0 || parentDecimals !== 0 || line.scrap !== "0") return -1;
-  const text = line.quantity as string;
-  if (text.length > 6) return -1;
-  const value = +text;
-  return Number.isInteger(value) && value >= 0 ? value : -1;
 }
 
 function ratioOf(line: PlanLine, component: number, parent: number, known: Map<string, Ratio>): Ratio {

@@ -1,5 +1,6 @@
 import type { Steps } from "../../quantity/steps";
 import type { PlanLine, PlanPart } from "../types";
+import type { PartNumbers } from "./part-numbers";
 
 export const BUY = 0;
 export const MAKE = 1;
@@ -33,7 +34,7 @@ export interface QuantityLines extends LineGroup {
 export interface Structure {
   parts: readonly PlanPart[];
   /** Part number key to number. */
-  numberOf: ReadonlyMap<string, number>;
+  numberOf: PartNumbers;
   level: Int32Array;
   sourcing: Uint8Array;
   decimals: Uint8Array;
