@@ -31,45 +31,57 @@ export function compileSupplies(
   today: IsoDate,
 ): Supplies {
   const day = dayNumber(today);
-  const find = (text: string) => structure.numberOf.get(text) ?? structure.numberOf.get(partKey(text));
-  const compiled = {
-    today: day,
-    stockNow: emptyPool(),
-    stockComing: emptyPool(),
-    orders: emptyPool(),
-    wide: false,
-  };
-  for (const [at, row] of stock.entries()) {
-    const part = find(row.partNumber);
-    if (part === undefined) continue;
-    const quantity = requireSteps(row.quantity, structure.decimals[part]);
-    const until = row.expiresOn === null ? Number.POSITIVE_INFINITY : dayNumber(row.expiresOn);
-    const bucket: Bucket = { day: until, quantity, flag: null, row: at };
-    addRow(compiled.stockNow, part, bucket);
-    if (!row.nowOnly) addRow(compiled.stockComing, part, bucket);
+  const find = (text: string) => structure.numberOf.get(text) ?? structure.numberOf.get(partKey(text)) ?? -1;
+  const parts = structure.parts.length;
+  const place = new Int32Array(stock.length);
+  const isDated = new Uint8Array(parts);
+  let isSplit = false;
+  for (let at = 0; at < stock.length; at++) {
+    place[at] = find(stock[at].partNumber);
+    if (place[at] < 0) continue;
+    if (stock[at].expiresOn !== null) isDated[place[at]] = 1;
+    if (stock[at].nowOnly) isSplit = true;
   }
-  for (const [at, row] of orders.entries()) {
-    const part = find(row.partNumber);
-    if (part === undefined) continue;
-    const quantity = requireSteps(row.quantity, structure.decimals[part]);
-    addRow(compiled.orders, part, {
-      ...countsFrom(row.due, day, structure.leadTime[part]),
-      quantity,
-      row: at,
-    });
+  const stockNow = emptyPool(parts);
+  const stockComing = isSplit ? emptyPool(parts) : stockNow;
+  for (let at = 0; at < stock.length; at++) {
+    const part = place[at];
+    if (part < 0) continue;
+    const { quantity, expiresOn, nowOnly } = stock[at];
+    const steps = requireSteps(quantity, structure.decimals[part]);
+    const until = expiresOn === null ? Number.POSITIVE_INFINITY : dayNumber(expiresOn);
+    // Stock that never expires needs no buckets: the total says it all.
+    const bucket: Bucket | null =
+      isDated[part] === 1 ? { day: until, quantity: steps, flag: null, row: at } : null;
+    addRow(stockNow, part, steps, bucket);
+    if (isSplit && !nowOnly) addRow(stockComing, part, steps, bucket);
   }
-  dropEndless(compiled.stockNow);
-  dropEndless(compiled.stockComing);
-  for (const pool of [compiled.stockNow, compiled.stockComing, compiled.orders]) {
-    for (const buckets of pool.buckets.values())
-      buckets.sort((a, b) => (a.day < b.day ? -1 : a.day > b.day ? 1 : 0));
-    for (const total of pool.totals.values()) compiled.wide ||= typeof total === "bigint";
-  }
-  return compiled;
+  const open = compileOrders(structure, orders, day, find);
+  for (const pool of new Set([stockNow, stockComing, open])) sortBuckets(pool);
+  const wide = [stockNow, stockComing, open].some(({ totals }) => Array.isArray(totals));
+  return { today: day, stockNow, stockComing, orders: open, wide };
 }
 
-function emptyPool(): Pool {
-  return { totals: new Map(), buckets: new Map() };
+function compileOrders(
+  structure: Structure,
+  orders: readonly PlanSupply[],
+  today: number,
+  find: (text: string) => number,
+): Pool {
+  const pool = emptyPool(structure.parts.length);
+  for (let at = 0; at < orders.length; at++) {
+    const { partNumber, quantity, due } = orders[at];
+    const part = find(partNumber);
+    if (part < 0) continue;
+    const steps = requireSteps(quantity, structure.decimals[part]);
+    const when = countsFrom(due, today, structure.leadTime[part]);
+    addRow(pool, part, steps, { ...when, quantity: steps, row: at });
+  }
+  return pool;
+}
+
+function emptyPool(parts: number): Pool {
+  return { totals: new Float64Array(parts), buckets: new Map() };
 }
 
 function countsFrom(due: IsoDate | null, today: number, leadTime: number): Omit<Bucket, "quantity" | "row"> {
@@ -78,16 +90,19 @@ function countsFrom(due: IsoDate | null, today: number, leadTime: number): Omit<
   return day < today ? { day: today + leadTime, flag: "overdue" } : { day, flag: null };
 }
 
-function addRow(pool: Pool, part: number, bucket: Bucket): void {
-  pool.totals.set(part, addSteps(pool.totals.get(part) ?? (0 as Steps), bucket.quantity));
+function addRow(pool: Pool, part: number, steps: Steps, bucket: Bucket | null): void {
+  const total = addSteps(pool.totals[part], steps);
+  if (typeof total === "bigint" && !Array.isArray(pool.totals))
+    pool.totals = Array.from(pool.totals as Float64Array);
+  pool.totals[part] = total;
+  if (bucket === null) return;
   const buckets = pool.buckets.get(part);
   if (buckets) buckets.push(bucket);
   else pool.buckets.set(part, [bucket]);
 }
 
-/** Stock that never expires needs no buckets: the total says it all. */
-function dropEndless(pool: Pool): void {
-  for (const [part, buckets] of pool.buckets) {
-    if (buckets.every((bucket) => bucket.day === Number.POSITIVE_INFINITY)) pool.buckets.delete(part);
+function sortBuckets(pool: Pool): void {
+  for (const buckets of pool.buckets.values()) {
+    if (buckets.length > 1) buckets.sort((a, b) => (a.day < b.day ? -1 : a.day > b.day ? 1 : 0));
   }
 }

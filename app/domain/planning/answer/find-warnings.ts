@@ -39,7 +39,7 @@ function hasUsable(
   day: number,
 ): boolean {
   const lots = buckets.get(part);
-  if (!lots) return (totals.get(part) ?? 0) > 0;
+  if (!lots) return totals[part] > 0;
   return lots.some((lot) => lot.day >= day && lot.quantity > 0);
 }
 

@@ -9,8 +9,10 @@ import type { Segment } from "./split-demand";
 /** How many kits of the segment can be complete after what the lane has served; `most` null has no end. */
 export function countShippable(lane: Lane, segment: Segment, low: Steps, most: Steps | null): Steps {
   const offer = offerTo(lane, segment);
-  const passes = (kits: Steps) =>
-    addsNoShortage(lane.structure, lane.state, tryKits(lane, offer, segment, kits));
+  const passes = (kits: Steps) => {
+    tryKits(lane, offer, segment, kits);
+    return addsNoShortage(lane);
+  };
   return largestPassing(low, most, passes);
 }
 

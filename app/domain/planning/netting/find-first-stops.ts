@@ -24,10 +24,7 @@ export function findFirstStops(input: FirstStopsInput): void {
   const { lane, offer, segment, rungs, served, stopsAt, before } = input;
   const { leaf } = lane.structure;
   const old = before.now.net;
-  const lacking: number[] = [];
-  for (let p = 0; p < leaf.length; p++) {
-    if (leaf[p] && lane.next.net[p] > old[p] && !stopsAt.has(p)) lacking.push(p);
-  }
+  const lacking = lane.engine.grown(leaf, lane.next.net, old).filter((p) => !stopsAt.has(p));
   const open = [{ low: BigInt(rungs), high: BigInt(segment.kits), parts: lacking }];
   for (let range = open.pop(); range; range = open.pop()) {
     const { low, high, parts } = range;

@@ -85,11 +85,12 @@ export function keepKits(lane: Lane, segment: Segment): void {
   lane.next = state;
 }
 
-/** True where the kits of `next` lack nothing that was not lacking before them. */
-export function addsNoShortage(structure: Structure, before: PassState, next: PassState): boolean {
-  for (let p = 0; p < structure.leaf.length; p++) {
-    if (structure.leaf[p] && next.net[p] > before.net[p]) return false;
-  }
+/** True where the kits of the last try lack nothing that was not lacking before them. */
+export function addsNoShortage({ structure, state, next }: Lane): boolean {
+  const { leaf } = structure;
+  const before = state.net;
+  const after = next.net;
+  for (let p = 0; p < leaf.length; p++) if (after[p] > before[p] && leaf[p] === 1) return false;
   return true;
 }
 

@@ -42,6 +42,11 @@ export interface PassInput {
 export interface Engine {
   zeros(length: number): Amounts;
   from(value: Steps): Steps;
+  copy(amounts: Amounts): Amounts;
+  /** `from - less`, part by part. */
+  subtract(from: Amounts, less: Amounts): Amounts;
+  /** Parts of the mask for which `after` is more than `before`, in order. */
+  grown(mask: Uint8Array, after: Amounts, before: Amounts): number[];
   /** False when a number left the range in which doubles are exact; the result is then void. */
   run(structure: Structure, input: PassInput, out: PassState): boolean;
 }
@@ -62,11 +67,7 @@ export function emptyState(structure: Structure, engine: Engine): PassState {
 
 /** The same figures in arrays of their own: a lane writes over its own ones. */
 export function copyState(state: PassState, engine: Engine): PassState {
-  const copy = (amounts: Amounts) => {
-    const own = engine.zeros(amounts.length);
-    for (let k = 0; k < amounts.length; k++) own[k] = amounts[k];
-    return own;
-  };
+  const { copy } = engine;
   return {
     gross: copy(state.gross),
     fromStock: copy(state.fromStock),

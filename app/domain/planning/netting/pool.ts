@@ -13,8 +13,8 @@ export interface Bucket {
 
 /** Stock or open orders of all parts: totals, and the buckets of those parts for which the day matters. */
 export interface Pool {
-  /** By part number, all buckets together; parts that are not here have none. */
-  totals: Map<number, Steps>;
+  /** By part number, all buckets together: doubles, or a plain array where one passes 2^53. */
+  totals: Amounts;
   /** Sorted by day: first expired first out, earliest order first. */
   buckets: Map<number, Bucket[]>;
 }
@@ -46,10 +46,7 @@ export function available(
   engine: Engine,
   admits: (day: number) => boolean,
 ): Amounts {
-  const amounts = engine.zeros(used.length);
-  for (const [part, total] of pool.totals) {
-    if (!pool.buckets.has(part)) amounts[part] = engine.from(subtractSteps(total, used[part]));
-  }
+  const amounts = engine.subtract(pool.totals, used);
   for (const [part, buckets] of pool.buckets) {
     const quantities = left.get(part) as Steps[];
     let sum: Steps = 0;

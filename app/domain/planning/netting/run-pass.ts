@@ -8,8 +8,23 @@ const MOST = Number.MAX_SAFE_INTEGER;
 export const numberEngine: Engine = {
   zeros: (length) => new Float64Array(length),
   from: (value) => Number(value),
+  copy: (amounts) => (amounts as Float64Array).slice(),
+  subtract: (from, less) => subtract(from as Float64Array, less as Float64Array),
+  grown: (mask, after, before) => grown(mask, after as Float64Array, before as Float64Array),
   run: runPass,
 };
+
+function subtract(from: Float64Array, less: Float64Array): Float64Array {
+  const rest = new Float64Array(from.length);
+  for (let p = 0; p < rest.length; p++) rest[p] = from[p] - less[p];
+  return rest;
+}
+
+function grown(mask: Uint8Array, after: Float64Array, before: Float64Array): number[] {
+  const parts: number[] = [];
+  for (let p = 0; p < mask.length; p++) if (after[p] > before[p] && mask[p] === 1) parts.push(p);
+  return parts;
+}
 
 interface NumberState extends PassState {
   gross: Float64Array;

@@ -7,6 +7,13 @@ import type { Engine, PassInput, PassState } from "./pass-state";
 export const wideEngine: Engine = {
   zeros: (length) => new Array<bigint>(length).fill(0n),
   from: (value) => BigInt(value),
+  copy: (amounts) => (amounts as bigint[]).slice(),
+  subtract: (from, less) => Array.from(less as bigint[], (used, p) => BigInt(from[p]) - used),
+  grown: (mask, after, before) => {
+    const parts: number[] = [];
+    for (let p = 0; p < mask.length; p++) if (after[p] > before[p] && mask[p] === 1) parts.push(p);
+    return parts;
+  },
   run: runWidePass,
 };
 

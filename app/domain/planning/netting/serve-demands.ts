@@ -50,7 +50,9 @@ export function serveDemands(input: ServeInput): Served {
   const before = leftOver(run, copyLeft);
   segments.forEach((segment, at) => {
     serveSegment(run, segment);
-    if (segment.alike !== segments[at + 1]?.alike) closeGroup(run, segment, engine);
+    if (segment.alike === segments[at + 1]?.alike) return;
+    addGroupNeeds(run, segment);
+    if (at + 1 < segments.length) run.groupBase = copyState(run.comingLane.state, engine);
   });
   const { nowLane, comingLane, allLane } = run;
   readyDates(structure, supplies, allLane.state, run.ready);
@@ -97,6 +99,11 @@ function openRun({ structure, supplies, first, segments, engine }: ServeInput): 
     needs: emptyNeeds(structure),
     groupBase: nothing,
   };
+}
+
+interface Lacking {
+  part: number;
+  lack: Steps;
 }
 
 interface Offers {
@@ -151,13 +158,13 @@ function climbRungs(run: Run, segment: Segment, offers: Offers): { rungs: number
   let free = 0;
   for (let kits = 1; kits <= rungs; kits++) {
     tryLanes(run, segment, offers, kits);
-    const { structure, nowLane } = run;
-    if (free === kits - 1 && addsNoShortage(structure, nowLane.state, nowLane.next)) free = kits;
+    const { nowLane, comingLane } = run;
+    if (free === kits - 1 && addsNoShortage(nowLane)) free = kits;
     const at = Number(run.served) + kits;
-    const short = lackOf(structure, run.comingLane.next, run.before.coming);
+    const short = lackOf(comingLane, comingLane.next, run.before.coming);
     const readyOn = Math.max(run.latest, dateSegment(run, segment));
     const shortOf = new Map(short.map(({ part, lack }) => [part, lack]));
-    const stoppers = lackOf(structure, nowLane.next, run.before.now).map(({ part, lack }) => ({
+    const stoppers = lackOf(nowLane, nowLane.next, run.before.now).map(({ part, lack }) => ({
       part,
       missing: lack,
       readyOn: run.ready[part],
@@ -182,15 +189,9 @@ function tryLanes(run: Run, segment: Segment, offers: Offers, kits: Steps): void
 }
 
 /** Leaves that lack more than they did before the kits asked for. */
-function lackOf(structure: Structure, state: PassState, before: PassState): { part: number; lack: Steps }[] {
-  const lacking: { part: number; lack: Steps }[] = [];
-  const { leaf } = structure;
-  const { net } = state;
-  for (let p = 0; p < leaf.length; p++) {
-    if (leaf[p] && net[p] > before.net[p])
-      lacking.push({ part: p, lack: subtractSteps(net[p], before.net[p]) });
-  }
-  return lacking;
+function lackOf({ structure, engine }: Lane, { net }: PassState, before: PassState): Lacking[] {
+  const parts = engine.grown(structure.leaf, net, before.net);
+  return parts.map((part) => ({ part, lack: subtractSteps(net[part], before.net[part]) }));
 }
 
 /** The day on which the kits of the last try are complete. */
@@ -201,11 +202,10 @@ function dateSegment(run: Run, segment: Segment): number {
   return ready[segment.part];
 }
 
-/** After the last of the demands that are alike: their dates, and where the next begin. */
-function closeGroup(run: Run, { part, due }: Segment, engine: Engine): void {
+/** After the last of the demands that are alike: their dates. */
+function addGroupNeeds(run: Run, { part, due }: Segment): void {
   const { structure, supplies, comingLane, groupBase } = run;
   addNeeds(structure, { part, due, base: groupBase, state: comingLane.state }, supplies.today, run.needs);
-  run.groupBase = copyState(comingLane.state, engine);
 }
 
 function keepChain(run: Run, segment: Segment, readyOn: number): void {
