@@ -1,3 +1,5 @@
+import { groupEdges } from "./group-edges";
+
 /** Edges from parent to component as two arrays of node numbers, one entry an edge. */
 export interface Edges {
   nodes: number;
@@ -15,11 +17,12 @@ export type LevelOrder =
  * in a circle the answer is one loop, whole and in order (first node not repeated), and the last of its
  * edges as they were given. Kahn's algorithm; no recursion, whatever the depth.
  */
-export function sortByLevel(edges: Edges): LevelOrder {
-  const { nodes, parents, components } = edges;
+export function sortByLevel(
+  { nodes, parents, components }: Edges,
+  { starts, edges } = groupEdges(nodes, parents),
+): LevelOrder {
   const waiting = new Int32Array(nodes);
   for (let e = 0; e < components.length; e++) waiting[components[e]]++;
-  const { starts, targets } = groupByParent(edges);
   const order = new Int32Array(nodes);
   const levels = new Int32Array(nodes);
   let filled = 0;
@@ -28,23 +31,13 @@ export function sortByLevel(edges: Edges): LevelOrder {
     const node = order[next];
     const below = levels[node] + 1;
     for (let k = starts[node]; k < starts[node + 1]; k++) {
-      const target = targets[k];
+      const target = components[edges[k]];
       if (levels[target] < below) levels[target] = below;
       if (--waiting[target] === 0) order[filled++] = target;
     }
   }
   if (filled < nodes) return { ok: false, ...findLoop(parents, components, waiting) };
   return { ok: true, order, levels };
-}
-
-function groupByParent({ nodes, parents, components }: Edges): { starts: Int32Array; targets: Int32Array } {
-  const starts = new Int32Array(nodes + 1);
-  for (let e = 0; e < parents.length; e++) starts[parents[e] + 1]++;
-  for (let node = 0; node < nodes; node++) starts[node + 1] += starts[node];
-  const next = starts.slice(0, nodes);
-  const targets = new Int32Array(parents.length);
-  for (let e = 0; e < parents.length; e++) targets[next[parents[e]]++] = components[e];
-  return { starts, targets };
 }
 
 /** Each node still waiting has a parent still waiting, so going up from any of them runs into a loop. */

@@ -1,3 +1,4 @@
+import { groupEdges } from "../graph/group-edges";
 import { sortByLevel } from "../graph/sort-by-level";
 import { partKey } from "./part-key";
 import { findOpenParts } from "./structure/find-open-parts";
@@ -24,19 +25,19 @@ export function compileStructure(parts: readonly PlanPart[], lines: readonly Pla
   const given = indexParts(parts, problems);
   const read = readLines(parts, lines, given, problems);
   if (problems.length > 0) return { ok: false, problems };
-  const sorted = sortByLevel({ nodes: parts.length, parents: read.parent, components: read.component });
+  const byParent = groupEdges(parts.length, read.parent);
+  const sorted = sortByLevel(
+    { nodes: parts.length, parents: read.parent, components: read.component },
+    byParent,
+  );
   if (!sorted.ok) return { ok: false, problems: [loopProblem(parts, sorted.loop, sorted.edge)] };
   const { order, levels } = sorted;
   const numbers = new Int32Array(parts.length);
   for (let n = 0; n < order.length; n++) numbers[order[n]] = n;
-  for (let e = 0; e < lines.length; e++) {
-    read.parent[e] = numbers[read.parent[e]];
-    read.component[e] = numbers[read.component[e]];
-  }
   const facts = readParts(parts, order, levels);
-  const groups = groupByKind(read, lines, facts.decimals);
+  const groups = groupByKind({ read, byParent, order, numbers, decimals: facts.decimals, lines });
   const open = findOpenParts(facts.sourcing, [groups.fixed, groups.conditional, groups.asRequired]);
-  const misplaced = checkConditions(lines, read, open);
+  const misplaced = checkConditions(lines, read, numbers, open);
   if (misplaced.length > 0) return { ok: false, problems: misplaced };
   const numberOf = partNumbers(given, numbers);
   return {
@@ -83,10 +84,15 @@ function loopProblem(parts: readonly PlanPart[], loop: number[], line: number): 
   return { code: "loop", line, loop: [...turned, turned[0]] };
 }
 
-function checkConditions(lines: readonly PlanLine[], read: ReadLines, open: Uint8Array): StructureProblem[] {
+function checkConditions(
+  lines: readonly PlanLine[],
+  read: ReadLines,
+  numbers: Int32Array,
+  open: Uint8Array,
+): StructureProblem[] {
   const problems: StructureProblem[] = [];
   for (let line = 0; line < lines.length && problems.length < MOST_PROBLEMS; line++) {
-    if ((read.kind[line] & CONDITIONAL) === 0 || open[read.parent[line]] === 1) continue;
+    if ((read.kind[line] & CONDITIONAL) === 0 || open[numbers[read.parent[line]]] === 1) continue;
     const { option, fromSerial, toSerial, fromDate, parent } = lines[line];
     const column =
       option !== null

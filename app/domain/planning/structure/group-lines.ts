@@ -1,59 +1,59 @@
+import type { EdgesByParent } from "../../graph/group-edges";
 import type { PlanLine } from "../types";
 import { lineRatio } from "./line-ratio";
 import type { ReadLines } from "./read-lines";
-import { AS_REQUIRED, CONDITIONAL } from "./read-lines";
+import { AS_REQUIRED, CONDITIONAL, FIXED } from "./read-lines";
 import type { LineGroup, QuantityLines, Ratio, Structure } from "./structure";
 
-type Groups = Pick<Structure, "fixed" | "conditional" | "asRequired">;
+/** Lines as they were read, by their parents' places in the input, and the parts' new order. */
+interface LinesToGroup {
+  read: ReadLines;
+  byParent: EdgesByParent;
+  /** Old place by new number, and the other way round. */
+  order: Int32Array;
+  numbers: Int32Array;
+  decimals: Uint8Array;
+  lines: readonly PlanLine[];
+}
 
 /** Lines by kind and parent number, with each one's ratio; within a parent they keep the order of the input. */
-export function groupByKind(read: ReadLines, lines: readonly PlanLine[], decimals: Uint8Array): Groups {
-  const parts = decimals.length;
-  const groupOf = (isOfKind: (kind: number) => boolean) =>
-    groupLines(parts, read, choose(read.kind, isOfKind));
-  const ratios = (group: LineGroup) => addRatios(group, read, lines, decimals);
+export function groupByKind(input: LinesToGroup): Pick<Structure, "fixed" | "conditional" | "asRequired"> {
+  const counts = [0, 0, 0, 0];
+  const { kind } = input.read;
+  for (let line = 0; line < kind.length; line++) counts[kind[line]]++;
   return {
-    fixed: ratios(groupOf((kind) => kind === 0)),
-    conditional: ratios(groupOf((kind) => kind === CONDITIONAL)),
-    asRequired: groupOf((kind) => (kind & AS_REQUIRED) !== 0),
+    fixed: addRatios(input, groupLines(input, FIXED, counts[FIXED])),
+    conditional: addRatios(input, groupLines(input, CONDITIONAL, counts[CONDITIONAL])),
+    asRequired: groupLines(input, AS_REQUIRED, counts[AS_REQUIRED] + counts[AS_REQUIRED | CONDITIONAL]),
   };
 }
 
-function choose(kind: Uint8Array, isOfKind: (kind: number) => boolean): Int32Array {
-  const isChosen = Uint8Array.of(0, 1, 2, 3).map((one) => (isOfKind(one) ? 1 : 0));
-  let count = 0;
-  for (let line = 0; line < kind.length; line++) count += isChosen[kind[line]];
-  const chosen = new Int32Array(count);
-  let filled = 0;
-  for (let line = 0; line < kind.length; line++) if (isChosen[kind[line]] === 1) chosen[filled++] = line;
-  return chosen;
-}
-
-function groupLines(parts: number, { parent, component }: ReadLines, chosen: Int32Array): LineGroup {
-  const starts = new Int32Array(parts + 1);
-  for (let k = 0; k < chosen.length; k++) starts[parent[chosen[k]] + 1]++;
-  for (let p = 0; p < parts; p++) starts[p + 1] += starts[p];
-  const next = starts.slice(0, parts);
-  const group = {
-    starts,
-    component: new Int32Array(chosen.length),
-    source: new Int32Array(chosen.length),
-  };
-  for (let k = 0; k < chosen.length; k++) {
-    const line = chosen[k];
-    const at = next[parent[line]]++;
-    group.component[at] = component[line];
-    group.source[at] = line;
+function groupLines(
+  { read, byParent, order, numbers }: LinesToGroup,
+  wanted: number,
+  count: number,
+): LineGroup {
+  const starts = new Int32Array(order.length + 1);
+  const component = new Int32Array(count);
+  const source = new Int32Array(count);
+  if (count === 0) return { starts, component, source };
+  let at = 0;
+  for (let p = 0; p < order.length; p++) {
+    starts[p] = at;
+    const end = byParent.starts[order[p] + 1];
+    for (let k = byParent.starts[order[p]]; k < end; k++) {
+      const line = byParent.edges[k];
+      const kind = read.kind[line];
+      if (kind !== wanted && (kind & AS_REQUIRED & wanted) === 0) continue;
+      component[at] = numbers[read.component[line]];
+      source[at++] = line;
+    }
   }
-  return group;
+  starts[order.length] = at;
+  return { starts, component, source };
 }
 
-function addRatios(
-  group: LineGroup,
-  { parent, pieces }: ReadLines,
-  lines: readonly PlanLine[],
-  decimals: Uint8Array,
-): QuantityLines {
+function addRatios({ read, lines, numbers, decimals }: LinesToGroup, group: LineGroup): QuantityLines {
   const { source, component } = group;
   const num = new Float64Array(source.length);
   const den = new Float64Array(source.length).fill(1);
@@ -61,10 +61,14 @@ function addRatios(
   const known = new Map<string, Ratio>();
   for (let at = 0; at < source.length; at++) {
     const line = source[at];
-    num[at] = pieces[line];
-    if (pieces[line] >= 0) continue;
-    const ratio = ratioOf(lines[line], decimals[component[at]], decimals[parent[line]], known);
-    storeRatio({ num, den, wide }, at, ratio);
+    num[at] = read.pieces[line];
+    if (num[at] >= 0) continue;
+    const parent = numbers[read.parent[line]];
+    storeRatio(
+      { num, den, wide },
+      at,
+      ratioOf(lines[line], decimals[component[at]], decimals[parent], known),
+    );
   }
   return { ...group, num, den, wide };
 }

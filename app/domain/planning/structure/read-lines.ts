@@ -2,7 +2,8 @@ import { partKey } from "../part-key";
 import type { PlanLine, PlanPart, StructureProblem } from "../types";
 import { isConditional } from "./structure";
 
-/** Bits of a line's kind: none of them is a line that always counts. */
+/** Bits of a line's kind. */
+export const FIXED = 0;
 export const CONDITIONAL = 1;
 export const AS_REQUIRED = 2;
 
