@@ -19,3 +19,11 @@ export async function bestTimeOf(runs: number, work: () => Promise<unknown>): Pr
   }
   return best;
 }
+
+/** Milliseconds of one of `many` in the fastest of so many runs, for work too short to be timed alone. */
+export function bestTimeEach(runs: number, many: number, work: (run: number) => unknown): number {
+  const time = bestTime(runs, () => {
+    for (let run = 0; run < many; run++) work(run);
+  });
+  return time / many;
+}

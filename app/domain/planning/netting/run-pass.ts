@@ -3,6 +3,8 @@ import { PHANTOM } from "../structure/structure";
 import type { Engine, PassInput, PassState } from "./pass-state";
 
 const MOST = Number.MAX_SAFE_INTEGER;
+/** Below it a product and one divisor more are still exact. */
+const HALF = 2 ** 52;
 
 /** Netting in doubles, exact below 2^53 (PLANNING.md, section 3). */
 export const numberEngine: Engine = {
@@ -61,11 +63,11 @@ function runPass(structure: Structure, input: PassInput, state: PassState): bool
     }
     if (need > MOST) return false;
     const added = need - base.gross[p];
-    const taken = Math.min(added, stock[p]);
+    const taken = added < stock[p] ? added : stock[p];
     let left = added - taken;
     fromStock[p] = base.fromStock[p] + taken;
     if (supply !== null) {
-      const ordered = Math.min(left, supply[p]);
+      const ordered = left < supply[p] ? left : supply[p];
       onOrder[p] = base.onOrder[p] + ordered;
       left -= ordered;
     } else onOrder[p] = 0;
@@ -89,6 +91,13 @@ function runPass(structure: Structure, input: PassInput, state: PassState): bool
 /** ceil(quantity x num / den); infinity where doubles cannot say it. */
 function timesRatio(quantity: number, num: number, den: number): number {
   const product = quantity * num;
+  if (den === 1 && product <= MOST) return product;
+  if (product < HALF && den < HALF) {
+    // Division may round up to the next whole number, and only there the rest is below 0. Far faster than `%`.
+    const whole = Math.floor(product / den);
+    const rest = product - whole * den;
+    return rest > 0 ? whole + 1 : whole;
+  }
   if (product <= MOST) {
     const rest = product % den;
     return (product - rest) / den + (rest > 0 ? 1 : 0);
