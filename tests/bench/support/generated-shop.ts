@@ -1,5 +1,7 @@
 import type { PlanLine, PlanPart, PlanStock } from "~/domain/planning/types";
 
+const FAMILY = 1000;
+
 interface GeneratedShop {
   parts: PlanPart[];
   lines: PlanLine[];
@@ -8,8 +10,9 @@ interface GeneratedShop {
 
 /**
  * A kit of so many parts and lines in which every part is needed. Three parts in ten are made, four to a parent at the
- * most, each used once; all other lines take 1 to 4 of a bought part anywhere, so that needs stay small. Stock covers
- * ten kits, but for one bought part in a thousand. Lines come parent by parent, as in a file.
+ * most, each used once; all other lines take 1 to 4 of a bought part, so that needs stay small. Nine in ten bought parts
+ * belong to a family of a thousand made ones, as those of one product do, the tenth goes anywhere, as fasteners do. Stock
+ * covers ten kits, but for one bought part in a thousand. Lines come parent by parent, as in a file.
  */
 export function generateShop(partCount: number, lineCount: number): GeneratedShop {
   const random = makeRandom(7);
@@ -20,12 +23,20 @@ export function generateShop(partCount: number, lineCount: number): GeneratedSho
   for (let line = 0; line < lineCount; line++) {
     const at = line + 1;
     component[line] = at < partCount ? at : makes + Math.floor(random() * (partCount - makes));
-    parent[line] = at < makes ? Math.floor((at - 1) / 4) : Math.floor(random() * makes);
+    if (at < makes) parent[line] = Math.floor((at - 1) / 4);
+    else if (random() < 0.1) parent[line] = Math.floor(random() * makes);
+    else {
+      const home = ((component[line] - makes) / (partCount - makes)) * makes;
+      parent[line] = Math.min(makes - 1, Math.max(0, Math.floor(home + (random() - 0.5) * FAMILY)));
+    }
   }
-  // A made part without lines would be a part that nobody makes.
-  for (let make = 0; make < makes; make++) parent[makes + make] = make;
+  // A made part without lines would be one that nobody makes.
+  for (let make = 0; make < makes; make++) {
+    component[partCount + make] = makes + Math.floor((make / makes) * (partCount - makes));
+    parent[partCount + make] = make;
+  }
   const perKit = new Int32Array(partCount);
-  const lines = byParent(parent, makes).map((line): PlanLine => {
+  const lines = Array.from(byParent(parent, makes), (line): PlanLine => {
     const pieces = component[line] < makes ? 1 : 1 + (line % 4);
     perKit[component[line]] += pieces;
     return {
@@ -62,11 +73,11 @@ function makePart(partNumber: string, at: number, isMade: boolean): PlanPart {
 }
 
 /** Line numbers, those of one parent together. */
-function byParent(parent: Int32Array, parents: number): number[] {
+function byParent(parent: Int32Array, parents: number): Int32Array {
   const next = new Int32Array(parents + 1);
   for (const one of parent) next[one + 1]++;
   for (let at = 0; at < parents; at++) next[at + 1] += next[at];
-  const sorted = new Array<number>(parent.length);
+  const sorted = new Int32Array(parent.length);
   for (let line = 0; line < parent.length; line++) sorted[next[parent[line]]++] = line;
   return sorted;
 }
