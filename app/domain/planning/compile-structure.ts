@@ -3,6 +3,7 @@ import { sortByLevel } from "../graph/sort-by-level";
 import { partKey } from "./part-key";
 import { findOpenParts } from "./structure/find-open-parts";
 import { groupByKind } from "./structure/group-lines";
+import { PartIndex } from "./structure/part-index";
 import { partNumbers } from "./structure/part-numbers";
 import type { ReadLines } from "./structure/read-lines";
 import { CONDITIONAL, MOST_PROBLEMS, readLines } from "./structure/read-lines";
@@ -64,13 +65,11 @@ function hasAny({ starts }: LineGroup, p: number): boolean {
   return starts[p + 1] > starts[p];
 }
 
-function indexParts(parts: readonly PlanPart[], problems: StructureProblem[]): Map<string, number> {
-  const given = new Map<string, number>();
+function indexParts(parts: readonly PlanPart[], problems: StructureProblem[]): PartIndex {
+  const given = new PartIndex(parts.length);
   for (let at = 0; at < parts.length; at++) {
-    const key = partKey(parts[at].partNumber);
-    given.set(key, at);
-    if (given.size > at - problems.length) continue;
-    problems.push({ code: "duplicate-part", part: at, partNumber: parts[at].partNumber });
+    const { partNumber } = parts[at];
+    if (!given.add(partKey(partNumber))) problems.push({ code: "duplicate-part", part: at, partNumber });
   }
   return given;
 }

@@ -1,5 +1,4 @@
 import type { Structure } from "../structure/structure";
-import { PHANTOM } from "../structure/structure";
 import type { Engine, PassInput, PassState } from "./pass-state";
 
 const MOST = Number.MAX_SAFE_INTEGER;
@@ -44,9 +43,10 @@ interface NumberState extends PassState {
 function runPass(structure: Structure, input: PassInput, state: PassState): boolean {
   const out = state as NumberState;
   const base = input.base as NumberState;
-  const { leaf, sourcing, yieldNum, yieldDen, open } = structure;
+  const { leaf, yieldNum, yieldDen, open } = structure;
   const { starts, component, num, den } = structure.fixed;
   const { gross, fromStock, onOrder, net, start } = out;
+  const { gross: hadGross, fromStock: hadStock, onOrder: hadOrders, net: hadNet } = base;
   const stock = input.stock as Float64Array;
   const supply = input.supply as Float64Array | null;
   gross.fill(0);
@@ -62,22 +62,23 @@ function runPass(structure: Structure, input: PassInput, state: PassState): bool
       continue;
     }
     if (need > MOST) return false;
-    const added = need - base.gross[p];
-    const taken = added < stock[p] ? added : stock[p];
+    const added = need - hadGross[p];
+    const taken = Math.min(added, stock[p]);
     let left = added - taken;
-    fromStock[p] = base.fromStock[p] + taken;
+    fromStock[p] = hadStock[p] + taken;
     if (supply !== null) {
-      const ordered = left < supply[p] ? left : supply[p];
-      onOrder[p] = base.onOrder[p] + ordered;
+      const ordered = Math.min(left, supply[p]);
+      onOrder[p] = hadOrders[p] + ordered;
       left -= ordered;
     } else onOrder[p] = 0;
-    const rest = base.net[p] + left;
+    const rest = hadNet[p] + left;
     net[p] = rest;
     if (leaf[p] === 1 || rest === 0) {
       start[p] = 0;
       continue;
     }
-    const begin = sourcing[p] === PHANTOM ? rest : timesRatio(rest, yieldNum[p], yieldDen[p]);
+    // A phantom passes on what it is asked for: its yield is 1.
+    const begin = yieldDen[p] === 1 ? rest * yieldNum[p] : timesRatio(rest, yieldNum[p], yieldDen[p]);
     if (begin > MOST) return false;
     start[p] = begin;
     for (let k = starts[p], end = starts[p + 1]; k < end; k++) {
@@ -91,7 +92,6 @@ function runPass(structure: Structure, input: PassInput, state: PassState): bool
 /** ceil(quantity x num / den); infinity where doubles cannot say it. */
 function timesRatio(quantity: number, num: number, den: number): number {
   const product = quantity * num;
-  if (den === 1 && product <= MOST) return product;
   if (product < HALF && den < HALF) {
     // Division may round up to the next whole number, and only there the rest is below 0. Far faster than `%`.
     const whole = Math.floor(product / den);

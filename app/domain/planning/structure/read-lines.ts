@@ -1,5 +1,6 @@
 import { partKey } from "../part-key";
 import type { PlanLine, PlanPart, StructureProblem } from "../types";
+import type { PartIndex } from "./part-index";
 import { isConditional } from "./structure";
 
 /** Bits of a line's kind. */
@@ -23,7 +24,7 @@ export const MOST_PROBLEMS = 100;
 export function readLines(
   parts: readonly PlanPart[],
   lines: readonly PlanLine[],
-  given: ReadonlyMap<string, number>,
+  given: PartIndex,
   problems: StructureProblem[],
 ): ReadLines {
   const parent = new Int32Array(lines.length);
@@ -33,8 +34,9 @@ export function readLines(
   const isPieces = new Uint8Array(parts.length);
   for (let at = 0; at < parts.length; at++) isPieces[at] = parts[at].decimals === 0 ? 1 : 0;
   const find = (text: string, line: number, column: "parent" | "component") => {
-    const at = given.get(text) ?? given.get(partKey(text));
-    if (at !== undefined) return at;
+    let at = given.find(text);
+    if (at < 0) at = given.find(partKey(text));
+    if (at >= 0) return at;
     problems.push({ code: "unknown-part", line, column, partNumber: text });
     return 0;
   };
