@@ -49,7 +49,7 @@ function runPass(structure: Structure, input: PassInput, state: PassState): bool
   const { gross: hadGross, fromStock: hadStock, onOrder: hadOrders, net: hadNet } = base;
   const stock = input.stock as Float64Array;
   const supply = input.supply as Float64Array | null;
-  gross.fill(0);
+  for (const amounts of [gross, fromStock, onOrder, net, start]) amounts.fill(0);
   out.throughLine.set(base.throughLine);
   for (const [part, quantity] of base.asked) gross[part] = quantity as number;
   gross[input.part] += Number(input.quantity);
@@ -57,10 +57,7 @@ function runPass(structure: Structure, input: PassInput, state: PassState): bool
   const hasConditions = structure.conditional.component.length > 0;
   for (let p = 0; p < gross.length; p++) {
     const need = gross[p];
-    if (need === 0) {
-      fromStock[p] = onOrder[p] = net[p] = start[p] = 0;
-      continue;
-    }
+    if (need === 0) continue;
     if (need > MOST) return false;
     const added = need - hadGross[p];
     const taken = Math.min(added, stock[p]);
@@ -70,13 +67,10 @@ function runPass(structure: Structure, input: PassInput, state: PassState): bool
       const ordered = Math.min(left, supply[p]);
       onOrder[p] = hadOrders[p] + ordered;
       left -= ordered;
-    } else onOrder[p] = 0;
+    }
     const rest = hadNet[p] + left;
     net[p] = rest;
-    if (leaf[p] === 1 || rest === 0) {
-      start[p] = 0;
-      continue;
-    }
+    if (leaf[p] === 1 || rest === 0) continue;
     // A phantom passes on what it is asked for: its yield is 1.
     const begin = yieldDen[p] === 1 ? rest * yieldNum[p] : timesRatio(rest, yieldNum[p], yieldDen[p]);
     if (begin > MOST) return false;
