@@ -1,13 +1,15 @@
-import { type RefObject, useEffect } from "react";
+import { type RefObject, useEffect, useRef } from "react";
 import { useLocation } from "react-router";
 
 /** Closes an open `<details>` on Escape, on a press outside it, and when the page changes. */
 export function useCloseDetails(ref: RefObject<HTMLDetailsElement | null>) {
   const { pathname } = useLocation();
-  // biome-ignore lint/correctness/useExhaustiveDependencies: runs when the path changes, whatever the path is.
+  const seen = useRef(pathname);
   useEffect(() => {
+    if (seen.current === pathname) return;
+    seen.current = pathname;
     ref.current?.removeAttribute("open");
-  }, [pathname]);
+  }, [pathname, ref]);
 
   useEffect(() => {
     function onKey(event: KeyboardEvent) {

@@ -27,7 +27,8 @@ export function NameMenu({ person }: NameMenuProps) {
         <p className="font-bold">{person.name}</p>
         <p className="text-soft">{person.roles.join(", ")}</p>
         <ThemeChoice />
-        <Form method="post" action="/sign-out">
+        {/* A whole new page, so that nothing this person has seen stays behind in the browser's memory. */}
+        <Form method="post" action="/sign-out" reloadDocument>
           <button type="submit" className="button mt-4 w-full">
             Sign out
           </button>
