@@ -52,6 +52,7 @@ export function buildCheckAnswer({
   return {
     question: { kit: "S2", quantity, by: due, options: [] },
     problem: null,
+    readyByDate: null,
     kits: [
       { partNumber: "S2", description: "Two-seat craft", options: [{ code: "CAB", description: "Cabin" }] },
       { partNumber: "S4", description: "Four-seat craft", options: [] },
@@ -109,6 +110,7 @@ export function buildCheckPart(overrides: Partial<CheckPart> = {}): CheckPart {
     partNumber: "S2",
     description: "Bearing, fan hub, sealed",
     sourcing: "buy",
+    hasLaterOrders: false,
     unit: "EA",
     decimals: 0,
     supplier: "Northquay Bearings",

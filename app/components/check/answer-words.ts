@@ -5,7 +5,7 @@ import { formatMoney } from "~/utils/format/format-money";
 import { formatQuantity } from "~/utils/format/format-quantity";
 import { cardinal, ordinal, sentenceCase } from "~/utils/format/number-words";
 import { unitSymbol } from "~/utils/format/unit-symbol";
-import { partNoun } from "./part-noun";
+import { partNoun, pluralOf } from "./part-noun";
 
 /** A run of the answer: plain words, words that say what stops kits, or a part number. */
 export interface Word {
@@ -19,22 +19,36 @@ export function answerWords(page: CheckPageAnswer): Word[] {
   const demand = page.answer?.demand[0];
   if (page.answer === null || demand === undefined) return [];
   const asked = Number(demand.quantity);
-  if (demand.buildable === null) return [{ text: `Nothing limits this kit: ${all(asked)} can go now.` }];
-  if (demand.buildable >= asked) return [{ text: `${sentenceCase(all(asked))} can go now.` }];
+  const made = page.answer.ladder.findLast((rung) => rung.stoppers.length === 0);
+  const by = made === undefined ? "" : byDay(made.readyOn, page);
+  if (demand.buildable === null || demand.buildable >= asked) {
+    const limit = demand.buildable === null ? "Nothing limits this kit. " : "";
+    const late = againstDue(demand.earliest, demand.due, page);
+    return [{ text: `${limit}${sentenceCase(all(asked))} can be made from what is here${by}${late}.` }];
+  }
 
   const stopped = demand.buildable + 1;
   const next = page.answer.ladder.find((rung) => rung.kits === stopped);
   const last = page.answer.ladder.at(-1);
   return [
-    { text: `${readyNow(demand.buildable, asked)} ` },
+    ...inTime(page, asked),
+    { text: `${fromStock(demand.buildable, asked, by)} ` },
     ...(next ? waits(page, next, asked) : []),
     ...(last ? allBy(page, last, asked, next === last) : []),
   ];
 }
 
-function readyNow(buildable: number, asked: number): string {
-  if (buildable > 0) return `${sentenceCase(cardinal(buildable))} can go now.`;
-  return asked === 1 ? "It cannot go now." : "None can go now.";
+/** With a date, how many make it comes first. */
+function inTime(page: CheckPageAnswer, asked: number): Word[] {
+  const due = page.answer?.demand[0]?.due ?? null;
+  if (due === null || page.readyByDate === null || asked === 1) return [];
+  const count = page.readyByDate === 0 ? "None" : sentenceCase(cardinal(page.readyByDate));
+  return [{ text: `${count} of ${cardinal(asked)} can be ready by ${onDay(due, page)}. ` }];
+}
+
+function fromStock(buildable: number, asked: number, by: string): string {
+  if (buildable > 0) return `${sentenceCase(cardinal(buildable))} can be made from what is here${by}.`;
+  return asked === 1 ? "It cannot be made from what is here." : "None can be made from what is here.";
 }
 
 function all(count: number): string {
@@ -49,12 +63,14 @@ function waits(page: CheckPageAnswer, rung: Rung, asked: number): Word[] {
   const who = asked === 1 ? "It" : `The ${ordinal(rung.kits)}`;
   if (worst === undefined || stopper === undefined) return [{ text: `${who} cannot go yet.`, stops: true }];
   const part = page.parts.find((one) => one.partNumber === worst);
+  const isOne = unitSymbol(part?.unit ?? "EA") !== "" || Number(stopper.missing) === 1;
+  const noun = part?.description ? partNoun(part.description) : "";
   const others = rung.stoppers.length - 1;
   const also = others === 0 ? "" : ` and ${cardinal(others)} other ${others === 1 ? "part" : "parts"}`;
   return [
     { text: `${who} waits for ${amount(stopper.missing, part)} `, stops: true },
     { text: worst, stops: true, figure: true },
-    { text: part?.description ? ` ${partNoun(part.description)}${also}` : also, stops: true },
+    { text: noun === "" ? also : ` ${isOne ? noun : pluralOf(noun)}${also}`, stops: true },
     { text: ` until ${onDay(rung.readyOn, page)}` },
   ];
 }
@@ -85,7 +101,11 @@ function price(rung: Rung): string {
   return `, for ${formatMoney(rung.cost)} more in parts`;
 }
 
+function byDay(iso: string, page: CheckPageAnswer): string {
+  return iso === page.answer?.today ? ", today" : `, by ${onDay(iso, page)}`;
+}
+
 function onDay(iso: string, page: CheckPageAnswer): string {
   const today = page.answer?.today;
-  return iso === today ? "later today" : formatDate(iso, { today });
+  return iso === today ? "today" : formatDate(iso, { today });
 }

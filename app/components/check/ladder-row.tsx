@@ -33,7 +33,12 @@ export function LadderRow({ row, page, isTopReady, hasRuns }: LadderRowProps) {
       </td>
       <td className="min-w-0 pt-[7px] pb-3 pl-3 sm:pl-4">
         {row.ready ? (
-          <span className={isTopReady ? "" : "sr-only"}>ready now</span>
+          <span className={isTopReady ? "" : "sr-only"}>
+            from what is here, by{" "}
+            <strong className="figure font-semibold">
+              {formatDate(row.readyOn, { today: page.answer?.today, short: true })}
+            </strong>
+          </span>
         ) : (
           <Stopped row={row} page={page} />
         )}

@@ -19,6 +19,7 @@ export function QuestionSentence({ question, kits, today, onAsk }: QuestionSente
   return (
     <Form
       method="get"
+      noValidate
       aria-label="The question"
       onSubmit={(event) => event.preventDefault()}
       className="flex flex-wrap items-center gap-x-[0.35em] gap-y-2 text-2xl leading-[1.5] sm:text-[2rem] print:text-2xl"

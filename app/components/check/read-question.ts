@@ -8,7 +8,7 @@ export function readQuestion(search: URLSearchParams, asked: CheckQuestion): Che
   return {
     kit: search.get("kit") || asked.kit,
     quantity: readKitCount(search.get("quantity") ?? "") ?? asked.quantity,
-    by: search.get("by") || null,
+    by: readDay(search.get("by"), asked.by),
     options: search
       .getAll("options")
       .flatMap((codes) => codes.split(","))
@@ -20,4 +20,12 @@ export function readQuestion(search: URLSearchParams, asked: CheckQuestion): Che
 export function readKitCount(text: string): number | null {
   const count = /^\d{1,4}$/.test(text.trim()) ? Number(text) : 0;
   return count >= 1 && count <= MOST_KITS ? count : null;
+}
+
+/** A day of the calendar, or none; `asked` where the text is neither. */
+function readDay(text: string | null, asked: string | null): string | null {
+  if (!text) return null;
+  if (!/^\d{4}-\d{2}-\d{2}$/.test(text)) return asked;
+  const day = new Date(`${text}T00:00:00Z`);
+  return Number.isNaN(day.getTime()) || day.toISOString().slice(0, 10) !== text ? asked : text;
 }

@@ -18,6 +18,7 @@ export function StopperLine({ row, asked, seesCosts }: StopperLineProps) {
         {row.supplier !== null && (
           <span className="block text-[0.9375rem] text-soft leading-snug">{row.supplier}</span>
         )}
+        {row.note !== null && <span className="block text-[0.9375rem] leading-snug">{row.note}</span>}
       </th>
       <td className="max-lg:col-span-full lg:pt-[1.15rem] lg:pr-4 lg:pb-3">
         <KitsCovered stopsAt={row.stopsAt} asked={asked} />

@@ -1,4 +1,5 @@
-import type { CheckPageAnswer } from "~/schemas/planning/check-answer";
+import type { Shortage } from "~/domain/planning/types";
+import type { CheckPageAnswer, CheckPart } from "~/schemas/planning/check-answer";
 import { alignOnPoint } from "~/utils/format/align-on-point";
 import { formatDate } from "~/utils/format/format-date";
 import { formatMoney } from "~/utils/format/format-money";
@@ -20,6 +21,8 @@ export interface StopperRow {
   hereOn: string;
   hereOnIso: string;
   cost: string | null;
+  /** What the figures alone would leave open. */
+  note: string | null;
 }
 
 /** The parts that stop kits in the order given, worst first, with figures aligned on their points. */
@@ -44,11 +47,19 @@ export function stopperRows(page: CheckPageAnswer): StopperRow[] {
         isShort: Number(shortage.short) > 0,
         hereOn: formatDate(shortage.readyOn, { today: page.answer?.today, short: true }),
         hereOnIso: shortage.readyOn,
+        note: noteOn(shortage, part),
         cost: part?.cost == null ? null : formatMoney(part.cost),
       },
     ];
   });
   return aligned(rows);
+}
+
+/** A part can be missing today though nothing of it has to come: builds under way take its place. */
+function noteOn(shortage: Shortage, part: CheckPart | undefined): string | null {
+  if (part?.hasLaterOrders) return "more is on order, after the date";
+  const comes = Number(shortage.short) > 0 || Number(shortage.onOrder) > 0;
+  return comes ? null : "builds under way will cover it";
 }
 
 function aligned(rows: StopperRow[]): StopperRow[] {

@@ -7,12 +7,16 @@ import type { Route } from "./+types/check";
 
 export const meta: Route.MetaFunction = () => [{ title: "Check · Cotterpin" }];
 
-/** What the address asks wrongly is left out, and the page shows what it asked instead. */
+/** Where the address asks what cannot be, the page says so and keeps the rest of the question. */
 export const loader = guardedLoader("look", ({ url }: Route.LoaderArgs, person) => {
   const search = Object.fromEntries(url.searchParams);
   const options = url.searchParams.getAll("options").join(",");
   const asked = checkQuestionSchema.safeParse({ ...search, options });
-  return getCheckAnswer(asked.success ? asked.data : { quantity: 10, options: [] }, person);
+  if (asked.success) return getCheckAnswer(asked.data, person);
+  const wrong = new Set(asked.error.issues.map((issue) => issue.path[0]));
+  const rest = Object.fromEntries(Object.entries(search).filter(([name]) => !wrong.has(name)));
+  const kept = checkQuestionSchema.parse({ ...rest, options: wrong.has("options") ? "" : options });
+  return getCheckAnswer({ ...kept, problem: asked.error.issues[0].message }, person);
 });
 
 /** While somebody fills in the question, the answers come through the JSON route. */

@@ -1,4 +1,5 @@
 import { z } from "zod";
+import { parseSerial, serialWithin } from "~/domain/planning/netting/serial";
 import { emptyAs } from "~/schemas/fields/empty-as";
 import { scrapFraction } from "~/schemas/fields/fraction";
 import { isoDate } from "~/schemas/fields/iso-date";
@@ -19,6 +20,18 @@ const row = z
     to_serial: emptyAs(code("a serial"), null),
     from_date: emptyAs(isoDate, null),
     to_date: emptyAs(isoDate, null),
+  })
+  .superRefine((cells, ctx) => {
+    const refuse = (column: string, message: string) =>
+      ctx.addIssue({ code: "custom", path: [column], message });
+    const { from_date: fromDate, to_date: toDate, from_serial: fromSerial, to_serial: toSerial } = cells;
+    if (fromDate !== null && toDate !== null && toDate < fromDate) {
+      refuse("to_date", `a day not before from_date ${fromDate}`);
+    }
+    const first = fromSerial === null ? null : parseSerial(fromSerial);
+    if (first !== null && toSerial !== null && !serialWithin(first, null, toSerial)) {
+      refuse("to_serial", `a serial not before from_serial ${fromSerial}`);
+    }
   })
   .transform((cells) => ({
     parent: cells.parent,

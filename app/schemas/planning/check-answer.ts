@@ -48,6 +48,8 @@ export interface CheckPart {
   supplier: string | null;
   leadTimeDays: number;
   unitCost: DecimalString | null;
+  /** There is more on order that comes after the date asked for. */
+  hasLaterOrders: boolean;
   /** `short` x unit cost for the whole question, two decimals. */
   cost: DecimalString | null;
 }
@@ -73,4 +75,6 @@ export interface CheckPageAnswer {
   /** Different parts in the kit's structure. */
   totalParts: number;
   seesCosts: boolean;
+  /** How many of the kits can be ready by the date asked for; null without a date. */
+  readyByDate: number | null;
 }

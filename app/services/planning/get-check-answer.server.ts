@@ -17,6 +17,8 @@ import { hideCosts } from "./hide-costs";
 import { planDemand } from "./plan-demand.server";
 
 interface Asked {
+  /** What the address asks that cannot be: said instead of an answer. */
+  problem?: string;
   kit?: string;
   quantity: number;
   by?: string;
@@ -45,8 +47,10 @@ export async function getCheckAnswer(asked: Asked, person: CurrentPerson): Promi
     stoppers: [],
     totalParts: 0,
     seesCosts,
+    readyByDate: null,
   };
   if (question.kit === null) return empty;
+  if (asked.problem !== undefined) return { ...empty, problem: asked.problem };
   const planned = tryPlan(book, question);
   if (typeof planned === "string") return { ...empty, problem: planned };
   const answer = presentShipCheck(planned);
@@ -57,8 +61,14 @@ export async function getCheckAnswer(asked: Asked, person: CurrentPerson): Promi
     answer: seesCosts ? drawn : hideCosts(drawn),
     parts,
     stoppers: worstFirst(planned),
+    readyByDate: readyByDate(answer),
     totalParts: countReached(book.structure, planned.segments[0].part),
   };
+}
+
+function readyByDate({ demand, ladder }: ShipCheck): number | null {
+  const due = demand[0].due;
+  return due === null ? null : ladder.filter((rung) => rung.readyOn <= due).length;
 }
 
 /** The kit that most open orders ask for, else the first one there is. */
@@ -112,6 +122,7 @@ function presentParts(book: PlanBook, plan: ShipPlan, answer: ShipCheck, seesCos
       decimals: part.decimals,
       supplier: part.offered,
       leadTimeDays: part.leadTimeDays,
+      hasLaterOrders: plan.served.all.onOrder[number] > plan.served.coming.onOrder[number],
       unitCost: seesCosts ? part.unitCost : null,
       cost: seesCosts && part.unitCost !== null ? costOf(plan, number) : null,
     };

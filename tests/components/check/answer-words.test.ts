@@ -14,8 +14,15 @@ const scarce = (...stopsAt: number[]) =>
 describe("the answer in words", () => {
   test("names what can go, what the next waits for, the day and the money", () => {
     expect(said()).toBe(
-      "Seven can go now. The eighth waits for two HB-2041 bearing until 20 January. All ten by 14 March, for 1,731.85 more in parts.",
+      "Seven can be made from what is here, today. The eighth waits for two HB-2041 bearings until 20 January. All ten by 14 March, for 1,731.85 more in parts.",
     );
+  });
+
+  test("with a date, says first how many make it", () => {
+    const page = { ...buildCheckAnswer({ due: "2027-02-01" }), readyByDate: 8 };
+    const words = answerWords(page).map((word) => word.text);
+    expect(words[0]).toBe("Eight of ten can be ready by 1 February. ");
+    expect(answerWords({ ...page, readyByDate: 0 })[0].text).toMatch(/^None of ten can be ready/);
   });
 
   test("says nothing of money to those who may not see costs", () => {
@@ -28,28 +35,33 @@ describe("the answer in words", () => {
   });
 
   test.each([
-    [{ quantity: 5 }, "All five can go now."],
-    [{ quantity: 2 }, "Both can go now."],
-    [{ quantity: 1 }, "It can go now."],
-    [{ buildable: null, scarce: [] }, "Nothing limits this kit: all ten can go now."],
-    [{ quantity: 13, scarce: scarce(14) }, "All 13 can go now."],
+    [{ quantity: 5 }, "All five can be made from what is here, today."],
+    [{ quantity: 2 }, "Both can be made from what is here, today."],
+    [{ quantity: 1 }, "It can be made from what is here, today."],
+    [
+      { buildable: null, scarce: [] },
+      "Nothing limits this kit. All ten can be made from what is here, by 14 March.",
+    ],
+    [{ quantity: 13, scarce: scarce(14) }, "All 13 can be made from what is here, by 14 March."],
   ])("knows when all can go: %j", (options, sentence) => {
     expect(said(options)).toBe(sentence);
   });
 
   test("knows none and one", () => {
     expect(said({ scarce: scarce(1), readyOn: { 1: "2027-01-20" } })).toMatch(
-      /^None can go now\. The first waits for one P-1 bearing until 20 January\. All ten by 20 January/,
+      /^None can be made from what is here\. The first waits for one P-1 bearing until 20 January\. All ten by 20 January/,
     );
     expect(said({ quantity: 1, scarce: scarce(1), readyOn: { 1: "2027-01-20" } })).toBe(
-      "It cannot go now. It waits for one P-1 bearing until 20 January, for 1,731.85 more in parts.",
+      "It cannot be made from what is here. It waits for one P-1 bearing until 20 January, for 1,731.85 more in parts.",
     );
-    expect(said({ scarce: scarce(2) })).toMatch(/^One can go now\. The second waits/);
+    expect(said({ scarce: scarce(2) })).toMatch(
+      /^One can be made from what is here, today\. The second waits/,
+    );
   });
 
   test("does not say the same date twice when only the last kit waits", () => {
     expect(said({ quantity: 8 })).toBe(
-      "Seven can go now. The eighth waits for two HB-2041 bearing until 20 January, for 1,731.85 more in parts.",
+      "Seven can be made from what is here, today. The eighth waits for two HB-2041 bearings until 20 January, for 1,731.85 more in parts.",
     );
   });
 

@@ -1,6 +1,6 @@
 import { describe, expect, test } from "vitest";
 import { checkSearch } from "~/components/check/check-search";
-import { partNoun } from "~/components/check/part-noun";
+import { partNoun, pluralOf } from "~/components/check/part-noun";
 import { readKitCount, readQuestion } from "~/components/check/read-question";
 
 const asked = { kit: "S2", quantity: 10, by: null, options: [] };
@@ -14,6 +14,8 @@ describe("the question in the address", () => {
   test("is what the server answered where the address is silent or wrong", () => {
     expect(readQuestion(new URLSearchParams(), asked)).toBe(asked);
     expect(readQuestion(new URLSearchParams("quantity=ten"), asked)).toEqual(asked);
+    expect(readQuestion(new URLSearchParams("kit=S2&quantity=10&by=01/15/2027"), asked)).toEqual(asked);
+    expect(readQuestion(new URLSearchParams("kit=S2&quantity=10&by=2026-02-30"), asked)).toEqual(asked);
   });
 
   test.each([
@@ -39,4 +41,14 @@ test.each([
   ["", ""],
 ])("%j is called %j in a sentence", (description, noun) => {
   expect(partNoun(description)).toBe(noun);
+});
+
+test.each([
+  ["bearing", "bearings"],
+  ["assembly", "assemblies"],
+  ["box", "boxes"],
+  ["tray", "trays"],
+  ["harness", "harnesses"],
+])("%j are %j", (noun, plural) => {
+  expect(pluralOf(noun)).toBe(plural);
 });

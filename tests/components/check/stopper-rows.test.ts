@@ -30,3 +30,14 @@ test("a part without a supplier that is made here says so", () => {
   page.parts = [buildCheckPart({ partNumber: "HB-2041", supplier: null, sourcing: "make" })];
   expect(stopperRows(page)[0].supplier).toBe("built here");
 });
+
+test("a part that nothing has to come of says what covers it, and orders after the date are told", () => {
+  const page = buildCheckAnswer();
+  const [shortage] = page.answer?.shortages ?? [];
+  Object.assign(shortage, { short: "0", onOrder: "0" });
+  expect(stopperRows(page)[0].note).toBe("builds under way will cover it");
+  Object.assign(shortage, { short: "2" });
+  expect(stopperRows(page)[0].note).toBeNull();
+  page.parts = [buildCheckPart({ partNumber: "HB-2041", hasLaterOrders: true })];
+  expect(stopperRows(page)[0].note).toBe("more is on order, after the date");
+});

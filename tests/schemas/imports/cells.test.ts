@@ -190,3 +190,13 @@ test("mail addresses and currencies", () => {
     email: "",
   });
 });
+
+test.each([
+  [{ from_serial: "050", to_serial: "020" }, ["to_serial"]],
+  [{ from_serial: "098", to_serial: "100" }, []],
+  [{ from_serial: "7", to_serial: "7" }, []],
+  [{ from_date: "2027-01-02", to_date: "2027-01-01" }, ["to_date"]],
+  [{ from_date: "2027-01-01", to_date: "2027-01-01" }, []],
+])("effectivity %j", (cells, columns) => {
+  expect(refused(structureKind, { parent: "A", component: "B", ...cells })).toEqual(columns);
+});
