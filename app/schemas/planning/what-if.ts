@@ -43,6 +43,17 @@ function csvRow<Row>(kind: {
     .pipe(kind.row as z.ZodType<Row, { [column: string]: string }>);
 }
 
+/** A part's row of which some columns may be left out: `given` names those that are there. */
+const partChange = cells.transform((row, ctx) => {
+  const filled = "sourcing" in row ? row : { ...row, sourcing: "buy" };
+  const parsed = csvRow(partsKind).safeParse(filled);
+  if (parsed.success) return { given: new Set(Object.keys(row)), part: parsed.data };
+  for (const { path, message } of parsed.error.issues) {
+    ctx.addIssue({ code: "custom", path: [...path], message, input: row });
+  }
+  return z.NEVER;
+});
+
 const supplyChange = z.union([
   z.strictObject({ reference: code("an order's number"), due: optionalDate }),
   z.strictObject({ partNumber, quantity: positiveQuantity, due: optionalDate }),
@@ -58,7 +69,7 @@ const whatIf = z.strictObject({
     .max(MOST_ENTRIES)
     .default([]),
   supply: z.array(supplyChange).max(MOST_ENTRIES).default([]),
-  parts: z.array(csvRow(partsKind)).max(MOST_ENTRIES).default([]),
+  parts: z.array(partChange).max(MOST_ENTRIES).default([]),
   structure: z
     .array(csvRow(structureKind))
     .max(MOST_ENTRIES * 4)

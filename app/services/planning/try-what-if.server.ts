@@ -1,6 +1,6 @@
 import { compileSupplies } from "~/domain/planning/compile-supplies";
 import { partKey } from "~/domain/planning/part-key";
-import type { PlanLine, StructureProblem } from "~/domain/planning/types";
+import type { PlanLine, PlanPart, StructureProblem } from "~/domain/planning/types";
 import { changeStock } from "~/domain/planning/what-if/change-stock";
 import { changeStructure } from "~/domain/planning/what-if/change-structure";
 import { changeSupply } from "~/domain/planning/what-if/change-supply";
@@ -21,7 +21,7 @@ export type TriedBook = Pick<PlanBook, "structure" | "supplies">;
 export function tryWhatIf(book: PlanBook, changes: Changes): TriedBook {
   if (Object.values(changes).every((list) => list.length === 0)) return book;
   const compiled = changeStructure(book.structure, {
-    parts: changes.parts,
+    parts: changes.parts.map((change) => changePart(book, change)),
     structure: groupByParent(changes.structure),
   });
   if (!compiled.ok) throw refusal(compiled.problems.map(sayStructureProblem));
@@ -31,6 +31,29 @@ export function tryWhatIf(book: PlanBook, changes: Changes): TriedBook {
   const problems = [stock, supply].flatMap((changed) => (changed.ok ? [] : changed.problems));
   if (!stock.ok || !supply.ok) throw refusal(problems.map(sayProblem));
   return { structure, supplies: compileSupplies(structure, stock.stock, supply.supply, book.day) };
+}
+
+/** What the change does not speak of stays as it is stored; a new part takes the defaults. */
+function changePart({ structure }: PlanBook, { given, part }: Changes["parts"][number]): PlanPart {
+  const number = structure.numberOf.get(partKey(part.partNumber));
+  if (number === undefined) {
+    if (given.has("sourcing")) return part;
+    const message = `There is no part ${part.partNumber} in the book: say its sourcing to add it.`;
+    throw refusal([{ field: "whatIf.parts", value: part.partNumber, message }]);
+  }
+  const stored = structure.parts[number];
+  const pick = <Key extends keyof PlanPart>(column: string, key: Key) =>
+    (given.has(column) ? part : stored)[key];
+  return {
+    partNumber: stored.partNumber,
+    sourcing: pick("sourcing", "sourcing"),
+    unit: pick("unit", "unit"),
+    decimals: pick("decimals", "decimals"),
+    leadTimeDays: pick("lead_time_days", "leadTimeDays"),
+    yield: pick("yield", "yield"),
+    unitCost: pick("unit_cost", "unitCost"),
+    massKg: pick("mass_kg", "massKg"),
+  };
 }
 
 function groupByParent(lines: readonly PlanLine[]): { parent: string; lines: PlanLine[] }[] {
