@@ -26,6 +26,8 @@ export default [
   route("api/structure/:partNumber", "routes/api/structure.ts"),
   route("api/where-used/:partNumber", "routes/api/where-used.ts"),
   route("api/imports/:kind", "routes/api/imports.ts"),
+  route("api/exports/book", "routes/api/export-book.ts"),
+  route("api/exports/:kind", "routes/api/exports.ts"),
   route("api/health", "routes/api/health.ts"),
 
   route("*", "routes/not-found.tsx"),

@@ -4,8 +4,6 @@ import path from "node:path";
 import { Setting } from "~/db/models/system/setting";
 import { readRows } from "~/db/read-rows.server";
 import { importFile } from "~/services/imports/import-file.server";
-import { importMovements } from "~/services/imports/import-movements.server";
-import type { CurrentPerson } from "~/services/people/current-person";
 import { seedPeople } from "./seed-people";
 import { shiftDates } from "./shift-dates";
 
@@ -29,17 +27,12 @@ const kindsInOrder = [
   "parts",
   "structure",
   "offers",
+  // The movements of the past lead up to the stock, which then only dates the lots.
+  "movements",
   "stock",
   "supply",
   "kit-orders",
 ] as const;
-
-async function seedMovements({ folder, today, say }: Seeding, person: CurrentPerson): Promise<void> {
-  const file = path.join(folder, "movements.csv");
-  if (!existsSync(file)) return;
-  const count = await importMovements({ bytes: shiftDates(await readFile(file), today), person });
-  say(`movements: ${count}`);
-}
 
 /** Puts the demo firm into an empty database, through the imports that people use; leaves any other alone. */
 export async function seedDemo(seeding: Seeding): Promise<boolean> {
@@ -48,9 +41,9 @@ export async function seedDemo(seeding: Seeding): Promise<boolean> {
   const person = await seedPeople();
   say("people: 5");
   for (const kind of kindsInOrder) {
-    // The movements of the past lead up to the stock, which then only dates the lots.
-    if (kind === "stock") await seedMovements(seeding, person);
-    const bytes = shiftDates(await readFile(path.join(folder, `${kind}.csv`)), today);
+    const file = path.join(folder, `${kind}.csv`);
+    if (kind === "movements" && !existsSync(file)) continue;
+    const bytes = shiftDates(await readFile(file), today);
     const { counts } = await importFile(kind, { bytes, person });
     say(`${kind}: ${counts.new + counts.changed + counts.same}`);
   }

@@ -10,6 +10,8 @@ export interface TestDatabase {
   migrateUrl: string;
   /** Runs one statement as the migrating user, past the application. */
   query(sql: string, values?: unknown[]): Promise<Record<string, unknown>[]>;
+  /** Makes the schema as the migrations left it, in the middle of a test. */
+  clear(): Promise<void>;
 }
 
 /**
@@ -30,6 +32,7 @@ export function useTestDatabase(): TestDatabase {
     appUrl: schema.DATABASE_URL,
     migrateUrl: schema.DATABASE_MIGRATE_URL,
     query: (sql, values) => connection.query(sql, values),
+    clear: () => emptyTables(connection, schema.baseline),
   };
 }
 

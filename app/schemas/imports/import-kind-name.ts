@@ -5,6 +5,7 @@ export const importKindNames = [
   "parts",
   "structure",
   "offers",
+  "movements",
   "stock",
   "supply",
   "kit-orders",

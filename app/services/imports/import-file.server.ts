@@ -1,6 +1,7 @@
 import type { ImportKindName } from "~/schemas/imports/import-kind-name";
 import { importBins } from "./import-bins.server";
 import { importKitOrders } from "./import-kit-orders.server";
+import { importMovements } from "./import-movements.server";
 import { importOffers } from "./import-offers.server";
 import { importParts } from "./import-parts.server";
 import { importStock } from "./import-stock.server";
@@ -16,6 +17,7 @@ const imports: Record<ImportKindName, (request: ImportRequest) => Promise<Import
   parts: importParts,
   structure: importStructure,
   offers: importOffers,
+  movements: importMovements,
   stock: importStock,
   supply: importSupply,
   "kit-orders": importKitOrders,

@@ -8,31 +8,15 @@ import { assertMay } from "~/services/people/assert-may.server";
 import type { CurrentPerson } from "~/services/people/current-person";
 import { raiseRevision } from "~/services/revision/raise-revision.server";
 import type { RevisionName } from "~/services/revision/revision-name";
-import type { CsvProblem } from "~/utils/csv/csv-problem";
-import { AppError, type FieldError } from "~/utils/errors";
 import type { ImportJob } from "./import-job";
-import { type ImportAnswer, presentProblem, presentRows } from "./present-import";
+import { type ImportAnswer, presentRows } from "./present-import";
+import { refuseFile, refuseRows } from "./refuse-import";
 
 export interface ImportRequest {
   bytes: Uint8Array;
   person: CurrentPerson;
   /** Only says what would change. */
   dryRun?: boolean;
-}
-
-const mostErrors = 100;
-
-function refuseFile(problems: readonly CsvProblem[]): AppError {
-  return new AppError("invalid", "The file cannot be read; nothing was changed.", {
-    errors: problems.map(presentProblem),
-  });
-}
-
-function refuseRows(errors: readonly FieldError[], refused: number): AppError {
-  const rows = refused === 1 ? "One row is" : `${refused} rows are`;
-  return new AppError("invalid", `${rows} refused; nothing was changed. Mend the file and send it again.`, {
-    errors: errors.slice(0, mostErrors),
-  });
 }
 
 /** Whoever changes the same things waits here, so that what was planned is still so when it is written. */

@@ -1,5 +1,6 @@
 import type { ImportKind } from "~/schemas/imports/import-kind";
 import type { CsvProblem } from "~/utils/csv/csv-problem";
+import { readTextCell } from "~/utils/csv/formula-cell";
 import { matchColumns } from "~/utils/csv/match-columns";
 import { type CsvRow, readCsv } from "~/utils/csv/read-csv";
 
@@ -49,7 +50,7 @@ export function readImportRows<Row>(bytes: Uint8Array, kind: ImportKind<Row>): I
   const refused: RefusedRow[] = [];
   for (const row of table.rows) {
     const cells: Record<string, string> = Object.fromEntries(empty);
-    for (const [cell, name] of names.entries()) cells[name] = row.cells[cell];
+    for (const [cell, name] of names.entries()) cells[name] = readTextCell(row.cells[cell]);
     const at = placeOf(names, row);
     const parsed = kind.row.safeParse(cells);
     if (parsed.success) {
