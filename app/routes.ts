@@ -17,6 +17,9 @@ export default [
   route("pack/kit-orders/:number", "routes/pack/edit-kit-order.tsx"),
   route("pack/kit-orders/:number/cancel", "routes/pack/cancel-kit-order.tsx"),
 
+  // find
+  route("find/files", "routes/find/files.tsx"),
+
   // api
   route("api/ship-check", "routes/api/ship-check.ts"),
   route("api/ship-line", "routes/api/ship-line.ts"),

@@ -17,6 +17,8 @@ export interface FieldError {
   line?: number;
   column?: string;
   value?: string;
+  /** The value is a header that the kind of file does not have. */
+  unknownHeader?: true;
   message: string;
 }
 

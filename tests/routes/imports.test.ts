@@ -1,5 +1,6 @@
 import { beforeAll, describe, expect, it, vi } from "vitest";
 import type { Role } from "~/schemas/people/role";
+import { getHeaders } from "~/services/imports/get-headers.server";
 import { createToken } from "~/services/people/create-token.server";
 import { useTestDatabase } from "../support/database";
 import { makeBuild, OURS, readRoutes, startApplication } from "./application";
@@ -58,6 +59,38 @@ describe("POST /api/imports/:kind", () => {
     expect((await send("parts?dryRun=1", `${parts}NUT,stolen\n`)).body.counts).toMatchObject({
       new: 2,
       refused: 1,
+    });
+  });
+
+  it("matches headers by hand, leaves columns out, and remembers it once the file is in", async () => {
+    const theirs = "Part no.,sourcing,Shelf\nKIT,make,9\n";
+    const refused = await send("parts?dryRun=1", theirs);
+    expect(
+      refused.body.errors.filter((error: { unknownHeader?: true }) => error.unknownHeader),
+    ).toMatchObject([{ value: "Part no." }, { value: "Shelf" }]);
+    const headers = encodeURIComponent(JSON.stringify({ "Part no.": "part_number", Shelf: "" }));
+    expect((await send(`parts?dryRun=1&headers=${headers}`, theirs)).body.counts).toMatchObject({ new: 1 });
+    expect(await getHeaders("parts")).toEqual({});
+    expect((await send(`parts?headers=${headers}`, theirs)).status).toBe(200);
+    expect(await getHeaders("parts")).toEqual({ "Part no.": "part_number", Shelf: "" });
+    expect((await send("parts?headers=nonsense", theirs)).status).toBe(422);
+  });
+
+  it("posts movements with their reversals, tries them without a trace, and posts nothing twice", async () => {
+    await send("parts", "part_number,sourcing\nBOLT,buy\n");
+    await send("bins", "bin\nA1\n");
+    const movements =
+      "number,reverses,happened_at,kind,part_number,quantity,from_bin,to_bin,reason\n1,,2026-11-01T08:00:00Z,receive,BOLT,9,,A1,\n2,1,2026-11-01T08:00:00Z,reverse,BOLT,9,,,Wrong part\n3,,2026-11-02T08:00:00Z,receive,BOLT,4,,A1,\n";
+    const onHand = () => database.query("SELECT quantity FROM balance WHERE quantity <> 0");
+    expect((await send("movements?dryRun=1", movements)).body.counts).toMatchObject({ new: 3, refused: 0 });
+    expect(await onHand()).toEqual([]);
+    expect((await send("movements", movements)).body.counts).toMatchObject({ new: 3 });
+    expect((await send("movements", movements)).body.counts).toMatchObject({ new: 0, same: 3 });
+    expect(await onHand()).toEqual([{ quantity: "4.000000" }]);
+    const short = movements.replace("receive,BOLT,4,,A1,", "issue,BOLT,40,A1,,");
+    expect((await send("movements?dryRun=1", short)).body.rows[2]).toMatchObject({
+      line: 4,
+      result: "refused",
     });
   });
 

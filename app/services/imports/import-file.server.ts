@@ -1,3 +1,4 @@
+import type { ImportAnswer } from "~/schemas/imports/import-answer";
 import type { ImportKindName } from "~/schemas/imports/import-kind-name";
 import { importBins } from "./import-bins.server";
 import { importKitOrders } from "./import-kit-orders.server";
@@ -8,7 +9,7 @@ import { importStock } from "./import-stock.server";
 import { importStructure } from "./import-structure.server";
 import { importSuppliers } from "./import-suppliers.server";
 import { importSupply } from "./import-supply.server";
-import type { ImportAnswer } from "./present-import";
+import { rememberHeaders } from "./remember-headers.server";
 import type { ImportRequest } from "./run-import.server";
 
 const imports: Record<ImportKindName, (request: ImportRequest) => Promise<ImportAnswer>> = {
@@ -23,7 +24,13 @@ const imports: Record<ImportKindName, (request: ImportRequest) => Promise<Import
   "kit-orders": importKitOrders,
 };
 
-/** Imports a file of any kind. Throws as `runImport` does. */
-export function importFile(kind: ImportKindName, request: ImportRequest): Promise<ImportAnswer> {
-  return imports[kind](request);
+/**
+ * Imports a file of any kind; headers that were matched by hand are remembered for the next file of that kind. Throws as
+ * `runImport` does.
+ */
+export async function importFile(kind: ImportKindName, request: ImportRequest): Promise<ImportAnswer> {
+  const answer = await imports[kind](request);
+  const { dryRun = false, headers = {} } = request;
+  if (!dryRun && Object.keys(headers).length > 0) await rememberHeaders(kind, headers);
+  return answer;
 }

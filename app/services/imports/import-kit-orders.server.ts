@@ -1,6 +1,7 @@
 import type { Transaction } from "sequelize";
 import { readRows } from "~/db/read-rows.server";
 import { partKey } from "~/domain/planning/part-key";
+import type { ImportAnswer } from "~/schemas/imports/import-answer";
 import { type KitOrderRow, kitOrdersKind } from "~/schemas/imports/kit-orders";
 import { type BookName, readPartNames } from "~/services/imports/book/read-book-names.server";
 import { runStatement } from "~/services/imports/book/run-statement.server";
@@ -10,7 +11,6 @@ import { decideRecords, type RecordChange } from "~/services/imports/decide/deci
 import type { ImportRow } from "~/services/imports/files/read-import-rows";
 import { findKits } from "~/services/kit-orders/find-kits.server";
 import type { ImportContext, ImportJob, ImportPlan } from "./import-job";
-import type { ImportAnswer } from "./present-import";
 import { type ImportRequest, runImport } from "./run-import.server";
 
 type Read = Omit<KitOrderRow, "options"> & {

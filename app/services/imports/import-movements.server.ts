@@ -3,6 +3,7 @@ import type { Transaction } from "sequelize";
 import { inTransaction } from "~/db/in-transaction.server";
 import { readRows } from "~/db/read-rows.server";
 import type { PostedKind } from "~/domain/stock/types";
+import type { ImportAnswer } from "~/schemas/imports/import-answer";
 import { type MovementRow, movementsKind } from "~/schemas/imports/movements";
 import { type ImportRow, readImportRows } from "~/services/imports/files/read-import-rows";
 import { assertMay } from "~/services/people/assert-may.server";
@@ -11,7 +12,7 @@ import { reverseMovement } from "~/services/stock/reverse-movement.server";
 import type { StockActor } from "~/services/stock/stock-actor";
 import { AppError, type FieldError } from "~/utils/errors";
 import type { Decision } from "./import-job";
-import { type ImportAnswer, presentRows } from "./present-import";
+import { presentRows } from "./present-import";
 import { refuseFile, refuseRows } from "./refuse-import";
 import type { ImportRequest } from "./run-import.server";
 
@@ -121,9 +122,10 @@ export async function importMovements({
   bytes,
   person,
   dryRun = false,
+  headers,
 }: ImportRequest): Promise<ImportAnswer> {
   const { id, roles } = assertMay(person, "import-stock");
-  const read = readImportRows(bytes, movementsKind);
+  const read = readImportRows(bytes, movementsKind, headers);
   if (!read.ok) throw refuseFile(read.problems);
   const { rows, refused, encoding, delimiter } = read;
   const fileHash = createHash("sha256").update(bytes).digest("hex");

@@ -1,6 +1,7 @@
 import type { Transaction } from "sequelize";
 import { readRows } from "~/db/read-rows.server";
 import { partKey } from "~/domain/planning/part-key";
+import type { ImportAnswer } from "~/schemas/imports/import-answer";
 import { type OfferRow, offersKind } from "~/schemas/imports/offers";
 import {
   type BookName,
@@ -20,7 +21,6 @@ import { unknownPart } from "~/services/imports/files/structure-problem";
 import type { CsvProblem } from "~/utils/csv/csv-problem";
 import { trimDecimal } from "~/utils/format/trim-decimal";
 import type { ImportContext, ImportJob, ImportPlan } from "./import-job";
-import type { ImportAnswer } from "./present-import";
 import { type ImportRequest, runImport } from "./run-import.server";
 
 type Read = Omit<OfferRow, "preferred"> & { id: number; preferred: number };

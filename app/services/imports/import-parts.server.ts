@@ -1,5 +1,6 @@
 import type { Transaction } from "sequelize";
 import { partKey } from "~/domain/planning/part-key";
+import type { ImportAnswer } from "~/schemas/imports/import-answer";
 import { type PartRow, partsKind } from "~/schemas/imports/parts";
 import { checkChangedParts } from "~/services/imports/book/check-changed-parts.server";
 import { readPartRecords } from "~/services/imports/book/read-part-records.server";
@@ -11,7 +12,6 @@ import { notePartNumber } from "~/services/imports/files/note-part-number";
 import type { ImportRow } from "~/services/imports/files/read-import-rows";
 import type { CsvProblem } from "~/utils/csv/csv-problem";
 import type { ImportContext, ImportJob, ImportPlan } from "./import-job";
-import type { ImportAnswer } from "./present-import";
 import { type ImportRequest, runImport } from "./run-import.server";
 
 const columns = [

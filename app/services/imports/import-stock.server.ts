@@ -1,5 +1,6 @@
 import { readRows } from "~/db/read-rows.server";
 import { partKey } from "~/domain/planning/part-key";
+import type { ImportAnswer } from "~/schemas/imports/import-answer";
 import { type StockRow, stockKind } from "~/schemas/imports/stock";
 import { readBalances } from "~/services/imports/book/read-balances.server";
 import { readPartNames } from "~/services/imports/book/read-book-names.server";
@@ -9,7 +10,6 @@ import { adjustmentOf, type BalanceGoal, planBalances } from "~/services/imports
 import type { ImportRow } from "~/services/imports/files/read-import-rows";
 import { postMovements } from "~/services/stock/post-movements.server";
 import type { ImportContext, ImportJob, ImportPlan } from "./import-job";
-import type { ImportAnswer } from "./present-import";
 import { type ImportRequest, runImport } from "./run-import.server";
 
 async function makeBins(goals: readonly BalanceGoal[], { transaction }: ImportContext): Promise<void> {

@@ -1,6 +1,7 @@
 import type { Transaction } from "sequelize";
 import { compileStructure } from "~/domain/planning/compile-structure";
 import { partKey } from "~/domain/planning/part-key";
+import type { ImportAnswer } from "~/schemas/imports/import-answer";
 import type { PartRow } from "~/schemas/imports/parts";
 import { type StructureRow, structureKind } from "~/schemas/imports/structure";
 import { readBookLines } from "~/services/imports/book/read-book-lines.server";
@@ -15,7 +16,6 @@ import type { ImportRow } from "~/services/imports/files/read-import-rows";
 import { structureProblem, unknownPart } from "~/services/imports/files/structure-problem";
 import type { CsvProblem } from "~/utils/csv/csv-problem";
 import type { ImportContext, ImportJob, ImportPlan } from "./import-job";
-import type { ImportAnswer } from "./present-import";
 import { type ImportRequest, runImport } from "./run-import.server";
 
 type Parts = ReadonlyMap<string, StoredRecord<PartRow>>;

@@ -1,6 +1,7 @@
 import type { Transaction } from "sequelize";
 import { readRows } from "~/db/read-rows.server";
 import { partKey } from "~/domain/planning/part-key";
+import type { ImportAnswer } from "~/schemas/imports/import-answer";
 import { type SupplierRow, suppliersKind } from "~/schemas/imports/suppliers";
 import { writeRows } from "~/services/imports/book/write-rows.server";
 import {
@@ -10,7 +11,6 @@ import {
 } from "~/services/imports/decide/decide-records";
 import type { ImportRow } from "~/services/imports/files/read-import-rows";
 import type { ImportContext, ImportJob, ImportPlan } from "./import-job";
-import type { ImportAnswer } from "./present-import";
 import { type ImportRequest, runImport } from "./run-import.server";
 
 type Read = SupplierRow & { id: number; supplierKey: string };

@@ -1,5 +1,6 @@
 import type { Transaction } from "sequelize";
 import { readRows } from "~/db/read-rows.server";
+import type { ImportAnswer } from "~/schemas/imports/import-answer";
 import { type SupplyRow, supplyKind } from "~/schemas/imports/supply";
 import { readPartNames } from "~/services/imports/book/read-book-names.server";
 import { readOpenOrders } from "~/services/imports/book/read-open-orders.server";
@@ -8,7 +9,6 @@ import { writeRows } from "~/services/imports/book/write-rows.server";
 import { planSupply, type SupplyChange } from "~/services/imports/decide/plan-supply";
 import type { ImportRow } from "~/services/imports/files/read-import-rows";
 import type { ImportContext, ImportJob, ImportPlan } from "./import-job";
-import type { ImportAnswer } from "./present-import";
 import { type ImportRequest, runImport } from "./run-import.server";
 
 /** From whom a part is bought first, by part id. */

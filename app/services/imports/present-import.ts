@@ -1,3 +1,4 @@
+import type { ImportAnswer, ImportLine, ImportResult } from "~/schemas/imports/import-answer";
 import { sameValues } from "~/services/imports/decide/same-values";
 import type { RefusedRow } from "~/services/imports/files/read-import-rows";
 import type { CsvProblem } from "~/utils/csv/csv-problem";
@@ -5,37 +6,14 @@ import { sayCsvProblem } from "~/utils/csv/say-csv-problem";
 import type { FieldError } from "~/utils/errors";
 import type { Decision, ImportPlan } from "./import-job";
 
-export type ImportResult = "new" | "changed" | "same" | "refused";
-
-export interface ImportLine {
-  /** Physical line of the file. */
-  line: number;
-  result: ImportResult;
-  before: object | null;
-  after: object | null;
-  errors: FieldError[];
-  notes: string[];
-}
-
-/** The answer to an import, done or only tried. */
-export interface ImportAnswer {
-  kind: string;
-  dryRun: boolean;
-  encoding: string;
-  delimiter: string;
-  rows: ImportLine[];
-  /** Structure lines that go since the file does not have them. */
-  removed: object[];
-  counts: Record<ImportResult | "removed", number>;
-}
-
 /** A problem of the file as an error of the answer. */
 export function presentProblem(problem: CsvProblem): FieldError {
-  const { line, column, value } = problem;
+  const { line, column, value, unknownHeader } = problem;
   return {
     ...(line === null ? {} : { line }),
     ...(column === null ? {} : { column }),
     ...(value === null ? {} : { value }),
+    ...(unknownHeader ? { unknownHeader } : {}),
     message: sayCsvProblem(problem),
   };
 }

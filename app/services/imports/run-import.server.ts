@@ -2,14 +2,16 @@ import { createHash } from "node:crypto";
 import type { Transaction } from "sequelize";
 import { inTransaction } from "~/db/in-transaction.server";
 import { readRows } from "~/db/read-rows.server";
+import type { ImportAnswer } from "~/schemas/imports/import-answer";
 import { appendAuditEvent } from "~/services/audit/append-audit-event.server";
 import { readImportRows } from "~/services/imports/files/read-import-rows";
 import { assertMay } from "~/services/people/assert-may.server";
 import type { CurrentPerson } from "~/services/people/current-person";
 import { raiseRevision } from "~/services/revision/raise-revision.server";
 import type { RevisionName } from "~/services/revision/revision-name";
+import type { HeaderMap } from "~/utils/csv/map-headers";
 import type { ImportJob } from "./import-job";
-import { type ImportAnswer, presentRows } from "./present-import";
+import { presentRows } from "./present-import";
 import { refuseFile, refuseRows } from "./refuse-import";
 
 export interface ImportRequest {
@@ -17,6 +19,8 @@ export interface ImportRequest {
   person: CurrentPerson;
   /** Only says what would change. */
   dryRun?: boolean;
+  /** Headers of the file that were matched by hand. */
+  headers?: HeaderMap;
 }
 
 /** Whoever changes the same things waits here, so that what was planned is still so when it is written. */
@@ -34,7 +38,7 @@ async function lockRevisions(names: readonly RevisionName[], transaction: Transa
 export async function runImport<Row>(job: ImportJob<Row>, request: ImportRequest): Promise<ImportAnswer> {
   const { bytes, dryRun = false } = request;
   const person = assertMay(request.person, job.act);
-  const read = readImportRows(bytes, job.kind);
+  const read = readImportRows(bytes, job.kind, request.headers);
   if (!read.ok) throw refuseFile(read.problems);
   const fileHash = createHash("sha256").update(bytes).digest("hex");
   return inTransaction(async (transaction) => {

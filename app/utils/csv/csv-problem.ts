@@ -10,4 +10,6 @@ export interface CsvProblem {
   expected: string;
   /** Says what was found where the value alone would not. */
   found?: string;
+  /** The header is none that the kind has: it can be matched by hand. */
+  unknownHeader?: true;
 }

@@ -24,7 +24,7 @@ export function matchColumns(header: CsvRow, { required, optional }: ColumnNames
     };
     if (!known.has(name)) {
       const found = name === "" ? "a column without a header" : `the unknown header ${JSON.stringify(name)}`;
-      problems.push({ ...place, found, expected: `one of ${[...known].join(", ")}` });
+      problems.push({ ...place, found, expected: `one of ${[...known].join(", ")}`, unknownHeader: true });
     } else if (seen.has(name)) {
       problems.push({ ...place, found: `the header "${name}" twice`, expected: "each header once" });
     }

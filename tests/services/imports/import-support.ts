@@ -1,6 +1,6 @@
+import type { ImportAnswer } from "~/schemas/imports/import-answer";
 import type { ImportKindName } from "~/schemas/imports/import-kind-name";
 import { importFile } from "~/services/imports/import-file.server";
-import type { ImportAnswer } from "~/services/imports/present-import";
 import type { CurrentPerson } from "~/services/people/current-person";
 import type { AppError } from "~/utils/errors";
 

@@ -1,6 +1,7 @@
 import type { ImportKind } from "~/schemas/imports/import-kind";
 import type { CsvProblem } from "~/utils/csv/csv-problem";
 import { readTextCell } from "~/utils/csv/formula-cell";
+import { type HeaderMap, mapHeaders } from "~/utils/csv/map-headers";
 import { matchColumns } from "~/utils/csv/match-columns";
 import { type CsvRow, readCsv } from "~/utils/csv/read-csv";
 
@@ -38,10 +39,15 @@ function placeOf(names: readonly string[], row: CsvRow): ImportRow<unknown>["at"
   };
 }
 
-/** Reads bytes as rows of one kind. Refused rows are told apart, so that all of them can be shown at once. */
-export function readImportRows<Row>(bytes: Uint8Array, kind: ImportKind<Row>): ImportRows<Row> {
-  const table = readCsv(bytes);
-  if (!table.ok) return table;
+/** Reads bytes as rows of one kind, their headers matched by hand where `headers` says so. Refused rows are told apart, so that all of them can be shown at once. */
+export function readImportRows<Row>(
+  bytes: Uint8Array,
+  kind: ImportKind<Row>,
+  headers: HeaderMap = {},
+): ImportRows<Row> {
+  const read = readCsv(bytes);
+  if (!read.ok) return read;
+  const table = mapHeaders(read, headers);
   const columns = matchColumns(table.header, kind.columns);
   if (!columns.ok) return columns;
   const { names } = columns;
