@@ -23,6 +23,7 @@ export default [
   // api
   route("api/ship-check", "routes/api/ship-check.ts"),
   route("api/ship-line", "routes/api/ship-line.ts"),
+  route("api/effects", "routes/api/effects.ts"),
   route("api/check-answer", "routes/api/check-answer.ts"),
   route("api/parts", "routes/api/parts.ts"),
   route("api/parts/:partNumber", "routes/api/part.ts"),

@@ -94,6 +94,40 @@ test("the ship line asks again after an act", async ({ page }) => {
   await expect(page.getByRole("status")).toContainText("is cancelled");
 });
 
+test("what an order does is said before it is saved, and is so afterwards", async ({ page }) => {
+  const faults = watchForFaults(page);
+  await signInAs(page, "idris");
+  await openPage(page, "/pack/kit-orders/new");
+  const effect = page.getByRole("group", { name: "What this does to the ship line" });
+  const line = page.getByRole("region", { name: "Ship line" });
+  const ready = async () => /\d+ of \d+ ready/.exec((await line.textContent()) ?? "")?.[0] ?? "";
+  await expect(effect).toContainText(/\d+ of \d+ ready/);
+  const height = (await effect.boundingBox())?.height;
+
+  await page.getByLabel("Priority").fill("");
+  await expect(effect).toContainText("Choose a kit and give a priority");
+  await page.getByLabel("Priority").fill("1");
+  await page.getByLabel("Wanted on").fill("2026-01-01");
+  await expect(effect).toContainText(/would (be first|become ready|stop at)/);
+  const told = await effect.textContent();
+  const after = /(\d+ of \d+ ready)/.exec(told ?? "")?.[1];
+  expect((await effect.boundingBox())?.height).toBe(height);
+  await page.getByRole("button", { name: "Enter the order" }).click();
+  const number = (await page.getByRole("status").textContent())?.match(/KO-\d+/)?.[0] ?? "";
+  expect(told).toContain(number);
+  await expect.poll(ready).toBe(after);
+
+  await page.getByRole("link", { name: number }).click();
+  await expect(effect).toContainText(`Nothing changes on the ship line: ${after}.`);
+  await page.getByRole("link", { name: /Cancel this order/ }).click();
+  await expect(effect).toContainText(/Ship line .*\d+ of \d+ ready/);
+  const restored = /(\d+ of \d+ ready)/.exec((await effect.textContent()) ?? "")?.[1];
+  await page.getByRole("button", { name: `Cancel ${number}` }).click();
+  await expect(page.getByRole("status")).toContainText("is cancelled");
+  await expect.poll(ready).toBe(restored);
+  faults.expectNone();
+});
+
 test("the clerk may look at kit orders and not enter them", async ({ page }) => {
   await signInAs(page, "wren");
   await page.goto("/pack/kit-orders");

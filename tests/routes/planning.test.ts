@@ -222,3 +222,58 @@ describe("the other planning routes", () => {
     }
   });
 });
+
+describe("POST /api/effects", () => {
+  const change = { stock: [{ partNumber: "BOLT", change: "-20" }] };
+
+  it("says the ship line before and after, to everybody who may look", async () => {
+    await bring("kit-orders", "number,kit,priority\nKO-1,KIT,1\nKO-2,KIT,2\n");
+    const { status, body } = await ask("/api/effects", { role: "clerk", body: { change } });
+    expect(status).toBe(200);
+    expect(body).toMatchObject({
+      before: { ready: 2, of: 2, next: null },
+      after: {
+        ready: 1,
+        of: 2,
+        next: { kitOrder: "KO-2", stoppers: [{ partNumber: "BOLT", missing: "5" }] },
+      },
+      becomeReady: [],
+      stop: [{ kitOrder: "KO-2" }],
+    });
+    expect((await ask("/api/ship-line")).body).toMatchObject({ ready: 2, of: 2 });
+  });
+
+  it.each([
+    ["nothing", {}, "change"],
+    ["an unknown list", { change: { colour: [] } }, "change"],
+    [
+      "a quantity in words",
+      { change: { stock: [{ partNumber: "BOLT", change: "some" }] } },
+      "change.stock.0.change",
+    ],
+    [
+      "a priority of 0",
+      { change: { kitOrders: { change: [{ number: "KO-1", priority: 0 }] } } },
+      "change.kitOrders.change.0.priority",
+    ],
+    [
+      "an unknown part",
+      { change: { stock: [{ partNumber: "NUT", change: "1" }] } },
+      "change.stock.0.partNumber",
+    ],
+  ])("refuses %s with 422", async (_, body, field) => {
+    expect(await ask("/api/effects", { body })).toMatchObject({ status: 422, body: { errors: [{ field }] } });
+  });
+
+  it("is closed to strangers and to other sites", async () => {
+    const send = (headers: Record<string, string>) =>
+      application("/api/effects", {
+        method: "POST",
+        headers: { "Content-Type": "application/json", ...headers },
+        body: JSON.stringify({ change }),
+      });
+    expect((await send(OURS)).status).toBe(401);
+    expect((await send({ Origin: "http://elsewhere.example" })).status).toBe(403);
+    expect((await ask("/api/effects")).status).toBe(405);
+  });
+});

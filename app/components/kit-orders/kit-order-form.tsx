@@ -1,10 +1,12 @@
 import { useEffect, useRef, useState } from "react";
 import { Form, Link, useNavigation } from "react-router";
 import { Field } from "~/components/forms/field";
+import { EffectLine } from "~/components/ui/effect-line";
 import { Notice } from "~/components/ui/notice";
 import type { OrderableKit } from "~/schemas/kit-orders/presented-kit-order";
 import { KitOptions } from "./kit-options";
-import type { KitOrderDraft } from "./kit-order-draft";
+import { kitOrderChange } from "./kit-order-change";
+import { draftFromForm, type KitOrderDraft } from "./kit-order-draft";
 
 interface KitOrderFormProps {
   kits: OrderableKit[];
@@ -19,6 +21,7 @@ interface KitOrderFormProps {
 /** Enter and edit share this form. One kit order is one kit. */
 export function KitOrderForm({ kits, draft, version, errors = {}, problem }: KitOrderFormProps) {
   const [kit, setKit] = useState(draft.kit);
+  const [typed, setTyped] = useState(draft);
   const form = useRef<HTMLFormElement>(null);
   const isBusy = useNavigation().state !== "idle";
   const options = kits.find((one) => one.partNumber === kit)?.options ?? [];
@@ -29,11 +32,17 @@ export function KitOrderForm({ kits, draft, version, errors = {}, problem }: Kit
     form.current?.querySelector<HTMLElement>("[aria-invalid=true], [role=alert]")?.focus();
   }, [errors, problem]);
 
+  // biome-ignore lint/correctness/useExhaustiveDependencies: another kit brings other options to tick.
+  useEffect(() => {
+    if (form.current) setTyped(draftFromForm(new FormData(form.current)));
+  }, [kit]);
+
   return (
     <Form
       ref={form}
       method="post"
       noValidate
+      onChange={(event) => setTyped(draftFromForm(new FormData(event.currentTarget)))}
       aria-label="Kit order"
       className="mt-6 grid max-w-3xl gap-x-8 gap-y-6 sm:grid-cols-2"
     >
@@ -135,6 +144,11 @@ export function KitOrderForm({ kits, draft, version, errors = {}, problem }: Kit
           )}
         </Field>
       </div>
+      <EffectLine
+        change={kitOrderChange(typed, kits, isNew ? null : draft.number)}
+        waiting="Choose a kit and give a priority, and this line says what the order does."
+        className="sm:col-span-2"
+      />
       <div className="flex flex-wrap items-center gap-4 sm:col-span-2">
         <button type="submit" className="button button-main min-h-12" aria-disabled={isBusy}>
           {isNew ? "Enter the order" : "Save the changes"}

@@ -1,4 +1,5 @@
 import { data, Form, Link, redirect } from "react-router";
+import { EffectLine } from "~/components/ui/effect-line";
 import { Notice } from "~/components/ui/notice";
 import { cancelKitOrder } from "~/services/kit-orders/cancel-kit-order.server";
 import { getKitOrder } from "~/services/kit-orders/get-kit-order.server";
@@ -36,7 +37,14 @@ export default function CancelKitOrder({ loaderData: order, actionData }: Route.
         {order.customer && ` for ${order.customer}`}. Its parts become free for the orders after it. A
         cancelled order stays in the list and cannot be opened again; enter a new one instead.
       </p>
-      <Form method="post" className="mt-6 flex flex-wrap items-center gap-4">
+      {order.state === "open" && (
+        <EffectLine
+          change={{ kitOrders: { cancel: [order.number] } }}
+          waiting=""
+          className="mt-6 max-w-3xl"
+        />
+      )}
+      <Form method="post" className="mt-2 flex flex-wrap items-center gap-4">
         <input type="hidden" name="version" value={order.version} />
         <button type="submit" className="button button-main min-h-12">
           Cancel {order.number}

@@ -9,24 +9,24 @@ import { structureKind } from "~/schemas/imports/structure";
 
 const MOST_ENTRIES = 500;
 
-const signedQuantity = z
+export const signedQuantity = z
   .string()
   .trim()
   .regex(/^[+-]?\d{1,24}(\.\d{1,6})?$/, "a quantity with its sign, such as +2 or -0.350");
-const optionalDate = z.union([isoDate, z.null()]).default(null);
+export const optionalDate = z.union([isoDate, z.null()]).default(null);
 const wholeKits = z
   .union([z.string(), z.number().int().transform(String)])
   .pipe(z.string().regex(/^0*[1-9]\d{0,11}$/, 'a whole number of kits above 0, such as "10"'))
   .transform((text) => String(Number(text)));
 
 /** Cells as the CSV holds them; a number is taken as it is written, nothing and null as an empty cell. */
-const cells = z.record(
+export const cells = z.record(
   z.string(),
   z.union([z.string(), z.number().transform(String), z.null().transform(() => "")]),
 );
 
 /** A row of a CSV kind in JSON: its columns as keys, those left out with their defaults. */
-function csvRow<Row>(kind: {
+export function csvRow<Row>(kind: {
   columns: { required: readonly string[]; optional: readonly string[] };
   row: z.ZodType<Row>;
 }) {
@@ -44,7 +44,7 @@ function csvRow<Row>(kind: {
 }
 
 /** A part's row of which some columns may be left out: `given` names those that are there. */
-const partChange = cells.transform((row, ctx) => {
+export const partChange = cells.transform((row, ctx) => {
   const filled = "sourcing" in row ? row : { ...row, sourcing: "buy" };
   const parsed = csvRow(partsKind).safeParse(filled);
   if (parsed.success) return { given: new Set(Object.keys(row)), part: parsed.data };

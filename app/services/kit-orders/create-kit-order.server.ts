@@ -2,13 +2,13 @@ import { type Transaction, UniqueConstraintError } from "sequelize";
 import { inTransaction } from "~/db/in-transaction.server";
 import { KitOrder } from "~/db/models/orders/kit-order";
 import { KitOrderOption } from "~/db/models/orders/kit-order-option";
-import { readRows } from "~/db/read-rows.server";
 import { type KitOrderInput, kitOrderSchema } from "~/schemas/kit-orders/kit-order";
 import { assertMay } from "~/services/people/assert-may.server";
 import type { CurrentPerson } from "~/services/people/current-person";
 import { AppError } from "~/utils/errors";
 import { parseInput } from "~/utils/request-body";
 import { checkKitOrder } from "./check-kit-order.server";
+import { nextKitOrderNumber } from "./next-kit-order-number.server";
 import { recordKitOrder } from "./record-kit-order.server";
 
 const MOST_TRIES = 5;
@@ -39,23 +39,13 @@ async function insert(
 ): Promise<string> {
   const partId = await checkKitOrder(order, null, transaction);
   const { options, kit: _kit, ...columns } = order;
-  const number = order.number ?? (await nextNumber(transaction));
+  const number = order.number ?? (await nextKitOrderNumber(transaction));
   const { id } = await KitOrder.create({ ...columns, number, partId }, { transaction });
   for (const optionCode of new Set(options)) {
     await KitOrderOption.create({ kitOrderId: id, optionCode }, { transaction });
   }
   await recordKitOrder({ actorId: person.id, number, after: { ...order, number } }, transaction);
   return number;
-}
-
-async function nextNumber(transaction: Transaction): Promise<string> {
-  const [row] = await readRows<{ last: number | string }>(
-    `SELECT COALESCE(MAX(CAST(SUBSTRING(number, 4) AS UNSIGNED)), 0) AS last
-     FROM kit_order WHERE number REGEXP '^KO-[0-9]{1,9}$'`,
-    {},
-    transaction,
-  );
-  return `KO-${String(Number(row.last) + 1).padStart(4, "0")}`;
 }
 
 function numberTaken(number: string | null): AppError {

@@ -9,10 +9,13 @@ export interface OpenKitOrder {
   options: string[];
   serial: string | null;
   wantedOn: IsoDate | null;
+  /** 1 is served first. */
+  priority: number;
 }
 
 const OPEN_ORDERS = `
   SELECT kit_order.number, part.part_number AS partNumber, kit_order.serial, kit_order.wanted_on AS wantedOn,
+    kit_order.priority,
     (SELECT GROUP_CONCAT(chosen.option_code ORDER BY chosen.option_code SEPARATOR '\n')
       FROM kit_order_option chosen WHERE chosen.kit_order_id = kit_order.id) AS options
   FROM kit_order

@@ -2,10 +2,10 @@ import type { Transaction } from "sequelize";
 import { readRows } from "~/db/read-rows.server";
 import type { Supplies } from "~/domain/planning/compile-supplies";
 import { compileSupplies } from "~/domain/planning/compile-supplies";
-import { splitPromised } from "~/domain/planning/split-promised";
 import type { Structure } from "~/domain/planning/structure/structure";
 import type { IsoDate, PlanStock, PlanSupply } from "~/domain/planning/types";
 import { trimDecimal } from "~/utils/format/trim-decimal";
+import { layOutStock, type ShelfRows } from "./lay-out-stock";
 
 /** Usable stock by lot; what is held, staged or with a supplier is out of reach. */
 const STOCK = `
@@ -50,6 +50,7 @@ interface InWork {
 export interface SupplyRows {
   stock: PlanStock[];
   orders: PlanSupply[];
+  shelves: ShelfRows;
 }
 
 /** Reads stock and open orders and lays them out for planning on the given day. */
@@ -65,13 +66,9 @@ export async function loadSupplies(
     partNumber,
     quantity: trimDecimal(promised),
   }));
-  const picked = inWork.map(({ partNumber, picked }) => ({
-    partNumber,
-    quantity: trimDecimal(picked),
-    expiresOn: null,
-    nowOnly: true,
-  }));
-  const rows = { stock: [...splitPromised(stock, promised), ...picked], orders };
+  const picked = inWork.map(({ partNumber, picked }) => ({ partNumber, quantity: trimDecimal(picked) }));
+  const shelves = { usable: stock, promised, picked };
+  const rows = { stock: layOutStock(shelves), orders, shelves };
   return { supplies: compileSupplies(structure, rows.stock, rows.orders, day), rows };
 }
 

@@ -1,6 +1,6 @@
 import { compileSupplies } from "~/domain/planning/compile-supplies";
 import { partKey } from "~/domain/planning/part-key";
-import type { PlanLine, PlanPart, StructureProblem } from "~/domain/planning/types";
+import type { PlanLine } from "~/domain/planning/types";
 import { changeStock } from "~/domain/planning/what-if/change-stock";
 import { changeStructure } from "~/domain/planning/what-if/change-structure";
 import { changeSupply } from "~/domain/planning/what-if/change-supply";
@@ -8,6 +8,8 @@ import type { WhatIfProblem } from "~/domain/planning/what-if/what-if";
 import type { ShipQuestion } from "~/schemas/planning/what-if";
 import { AppError, type FieldError } from "~/utils/errors";
 import type { PlanBook } from "./get-plan-book.server";
+import { changeBookPart } from "./what-if/change-book-part";
+import { sayStructureProblem } from "./what-if/say-structure-problem";
 
 type Changes = ShipQuestion["whatIf"];
 
@@ -21,39 +23,16 @@ export type TriedBook = Pick<PlanBook, "structure" | "supplies">;
 export function tryWhatIf(book: PlanBook, changes: Changes): TriedBook {
   if (Object.values(changes).every((list) => list.length === 0)) return book;
   const compiled = changeStructure(book.structure, {
-    parts: changes.parts.map((change) => changePart(book, change)),
+    parts: changes.parts.map((change) => changeBookPart(book.structure, change, "whatIf.parts")),
     structure: groupByParent(changes.structure),
   });
-  if (!compiled.ok) throw refusal(compiled.problems.map(sayStructureProblem));
+  if (!compiled.ok) throw refusal(compiled.problems.map((problem) => sayStructureProblem(problem, "whatIf")));
   const { structure } = compiled;
   const stock = changeStock(structure, book.rows.stock, changes);
   const supply = changeSupply(structure, book.rows.orders, changes.supply);
   const problems = [stock, supply].flatMap((changed) => (changed.ok ? [] : changed.problems));
   if (!stock.ok || !supply.ok) throw refusal(problems.map(sayProblem));
   return { structure, supplies: compileSupplies(structure, stock.stock, supply.supply, book.day) };
-}
-
-/** What the change does not speak of stays as it is stored; a new part takes the defaults. */
-function changePart({ structure }: PlanBook, { given, part }: Changes["parts"][number]): PlanPart {
-  const number = structure.numberOf.get(partKey(part.partNumber));
-  if (number === undefined) {
-    if (given.has("sourcing")) return part;
-    const message = `There is no part ${part.partNumber} in the book: say its sourcing to add it.`;
-    throw refusal([{ field: "whatIf.parts", value: part.partNumber, message }]);
-  }
-  const stored = structure.parts[number];
-  const pick = <Key extends keyof PlanPart>(column: string, key: Key) =>
-    (given.has(column) ? part : stored)[key];
-  return {
-    partNumber: stored.partNumber,
-    sourcing: pick("sourcing", "sourcing"),
-    unit: pick("unit", "unit"),
-    decimals: pick("decimals", "decimals"),
-    leadTimeDays: pick("lead_time_days", "leadTimeDays"),
-    yield: pick("yield", "yield"),
-    unitCost: pick("unit_cost", "unitCost"),
-    massKg: pick("mass_kg", "massKg"),
-  };
 }
 
 function groupByParent(lines: readonly PlanLine[]): { parent: string; lines: PlanLine[] }[] {
@@ -103,34 +82,6 @@ function sayProblem(problem: WhatIfProblem): FieldError {
         field,
         value: problem.reference,
         message: `No open order has the number ${problem.reference}.`,
-      };
-  }
-}
-
-function sayStructureProblem(problem: StructureProblem): FieldError {
-  switch (problem.code) {
-    case "loop":
-      return {
-        field: "whatIf.structure",
-        message: `The structure would run in a loop: ${problem.loop.join(" > ")}.`,
-      };
-    case "unknown-part":
-      return {
-        field: "whatIf.structure",
-        value: problem.partNumber,
-        message: `There is no part ${problem.partNumber} in the book.`,
-      };
-    case "duplicate-part":
-      return {
-        field: "whatIf.parts",
-        value: problem.partNumber,
-        message: `${problem.partNumber} stands there twice.`,
-      };
-    case "condition-not-allowed":
-      return {
-        field: "whatIf.structure",
-        value: problem.parent,
-        message: `Options and effectivity may not stand on ${problem.parent}: only on kits and phantoms used only under kits.`,
       };
   }
 }

@@ -1,7 +1,9 @@
+import { QueryClient, QueryClientProvider } from "@tanstack/react-query";
 import { renderToString } from "react-dom/server";
 import { createMemoryRouter, RouterProvider } from "react-router";
 import { describe, expect, test } from "vitest";
 import { formRefusal } from "~/components/kit-orders/form-refusal";
+import { kitOrderChange } from "~/components/kit-orders/kit-order-change";
 import { draftFromForm, draftOf } from "~/components/kit-orders/kit-order-draft";
 import { KitOrderForm } from "~/components/kit-orders/kit-order-form";
 
@@ -24,7 +26,11 @@ function form(extra: object = {}): string {
   const router = createMemoryRouter([
     { path: "/", element: <KitOrderForm kits={kits} draft={draft} {...extra} /> },
   ]);
-  return renderToString(<RouterProvider router={router} />);
+  return renderToString(
+    <QueryClientProvider client={new QueryClient()}>
+      <RouterProvider router={router} />
+    </QueryClientProvider>,
+  );
 }
 
 describe("the form of a kit order", () => {
@@ -41,6 +47,25 @@ describe("the form of a kit order", () => {
     const changed = form({ version: 3 });
     expect(changed).not.toContain('name="number"');
     expect(changed).toMatch(/<input type="hidden" name="version" value="3"/);
+  });
+});
+
+describe("what saving the form would change", () => {
+  test("is a new order, or a change of the one that is there", () => {
+    const order = { kit: "S2", options: ["CAB"], serial: "098", wantedOn: "2027-03-14", priority: 1 };
+    expect(kitOrderChange(draft, kits, null)).toEqual({ kitOrders: { add: [{ number: "", ...order }] } });
+    expect(kitOrderChange(draft, kits, "KO-1")).toEqual({
+      kitOrders: { change: [{ number: "KO-1", ...order }] },
+    });
+  });
+
+  test("leaves out options that the kit has not", () => {
+    const change = kitOrderChange({ ...draft, options: ["CAB", "TRAILER"] }, kits, null);
+    expect(change?.kitOrders?.add?.[0].options).toEqual(["CAB"]);
+  });
+
+  test.each([{ kit: "" }, { priority: "" }, { priority: "soon" }])("cannot be said with %o", (missing) => {
+    expect(kitOrderChange({ ...draft, ...missing }, kits, null)).toBeNull();
   });
 });
 
