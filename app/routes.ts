@@ -8,7 +8,7 @@ export default [
   route("set-up", "routes/auth/set-up.tsx"),
 
   // check
-  route("check", "routes/check/check.tsx"),
+  route("check", "routes/check/check.tsx", [route("why", "routes/check/why.tsx")]),
 
   // pack
   route("pack", "routes/pack/pack.ts"),
@@ -25,6 +25,7 @@ export default [
   route("api/ship-line", "routes/api/ship-line.ts"),
   route("api/effects", "routes/api/effects.ts"),
   route("api/check-answer", "routes/api/check-answer.ts"),
+  route("api/why", "routes/api/why.ts"),
   route("api/parts", "routes/api/parts.ts"),
   route("api/parts/:partNumber", "routes/api/part.ts"),
   route("api/structure/:partNumber", "routes/api/structure.ts"),

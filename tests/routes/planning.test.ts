@@ -277,3 +277,17 @@ describe("POST /api/effects", () => {
     expect((await ask("/api/effects")).status).toBe(405);
   });
 });
+
+describe("GET /api/why", () => {
+  it("opens a number of a part to its causes", async () => {
+    const { status, body } = await ask("/api/why?kit=KIT&quantity=3&part=BOLT");
+    expect(status).toBe(200);
+    expect(body).toMatchObject({ gross: "14", rest: "0", causes: [{ need: "6" }, { need: "8" }] });
+  });
+
+  it("refuses what cannot be asked, with a sentence", async () => {
+    expect((await ask("/api/why?kit=KIT")).body.errors).toMatchObject([{ field: "part" }]);
+    expect((await ask("/api/why?kit=KIT&part=NUT")).status).toBe(404);
+    expect((await ask("/api/why?kit=KIT&part=BOLT&kits=0")).status).toBe(422);
+  });
+});

@@ -1,7 +1,9 @@
+import { Link } from "react-router";
 import type { ChainLink } from "~/domain/planning/types";
 import type { CheckPageAnswer, CheckPart } from "~/schemas/planning/check-answer";
 import { daysBetween, formatDate } from "~/utils/format/format-date";
 import { ChainBar } from "./chain-bar";
+import { whyAddress } from "./why-address";
 
 /** What sets the date: from the kit down to the part that everything waits for, each on one line of time. */
 export function DateChain({ page }: { page: CheckPageAnswer }) {
@@ -27,7 +29,11 @@ export function DateChain({ page }: { page: CheckPageAnswer }) {
               key={link.partNumber}
               className="grid grid-cols-[minmax(0,1fr)_auto] items-center gap-x-4 sm:grid-cols-[minmax(0,13rem)_minmax(0,1fr)_auto]"
             >
-              <LinkName link={link} part={parts.get(link.partNumber)} />
+              <LinkName
+                link={link}
+                part={parts.get(link.partNumber)}
+                to={whyAddress({ question: page.question, part: link.partNumber, with: "orders" })}
+              />
               <ChainBar
                 from={daysBetween(today, chain[place + 1]?.readyOn ?? today)}
                 to={daysBetween(today, link.readyOn)}
@@ -45,10 +51,12 @@ export function DateChain({ page }: { page: CheckPageAnswer }) {
   );
 }
 
-function LinkName({ link, part }: { link: ChainLink; part: CheckPart | undefined }) {
+function LinkName({ link, part, to }: { link: ChainLink; part: CheckPart | undefined; to: string }) {
   return (
     <p className="min-w-0 leading-snug">
-      <span className="figure block truncate">{link.partNumber}</span>
+      <Link to={to} preventScrollReset className="figure block truncate underline">
+        {link.partNumber}
+      </Link>
       <span className="block text-[0.9375rem] text-soft">
         {part === undefined ? "" : `${part.description.split(",")[0]}, `}
         {reason(link, part)}

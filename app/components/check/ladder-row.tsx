@@ -64,7 +64,13 @@ function Stopped({ row, page }: { row: Row; page: CheckPageAnswer }) {
           </>
         )}
       </p>
-      <StopperTags fresh={row.fresh} carried={row.carried} parts={page.parts} />
+      <StopperTags
+        fresh={row.fresh}
+        carried={row.carried}
+        parts={page.parts}
+        question={page.question}
+        kits={row.to}
+      />
     </>
   );
 }

@@ -1,3 +1,4 @@
+import { Link } from "react-router";
 import { KitsCovered } from "./kits-covered";
 import type { StopperRow } from "./stopper-rows";
 
@@ -5,15 +6,19 @@ interface StopperLineProps {
   row: StopperRow;
   asked: number;
   seesCosts: boolean;
+  /** Where its numbers open to their causes. */
+  why: string;
 }
 
 /** One part that stops kits: a table row at a desk, a small sheet on a phone. */
-export function StopperLine({ row, asked, seesCosts }: StopperLineProps) {
+export function StopperLine({ row, asked, seesCosts, why }: StopperLineProps) {
   const unit = row.unit === "" ? "" : `, ${row.unit}`;
   return (
     <tr className="border-line border-b align-top max-lg:grid max-lg:grid-cols-3 sm:max-lg:grid-cols-6 max-lg:gap-x-4 max-lg:gap-y-2 max-lg:py-4">
       <th scope="row" className="text-left font-normal max-lg:col-span-full lg:py-3 lg:pr-4">
-        <span className="figure block font-semibold">{row.partNumber}</span>
+        <Link to={why} preventScrollReset className="figure -my-1 inline-block py-1 font-semibold underline">
+          {row.partNumber}
+        </Link>
         <span className="block text-[0.9375rem] text-soft leading-snug">{row.description}</span>
         {row.supplier !== null && (
           <span className="block text-[0.9375rem] text-soft leading-snug">{row.supplier}</span>

@@ -1,7 +1,8 @@
 import { useState } from "react";
-import type { CheckPart } from "~/schemas/planning/check-answer";
+import type { CheckPart, CheckQuestion } from "~/schemas/planning/check-answer";
 import type { LadderRow } from "./ladder-rows";
 import { Tag } from "./tag";
+import { whyAddress } from "./why-address";
 
 const MOST_TAGS = 6;
 
@@ -9,13 +10,16 @@ interface StopperTagsProps {
   fresh: LadderRow["fresh"];
   carried: LadderRow["carried"];
   parts: CheckPart[];
+  question: CheckQuestion;
+  /** The rung they hang on. */
+  kits: number;
 }
 
 /**
  * The parts a rung hangs on. Shown are those that stop no kit below it; those known from below, and what is
  * too much for a row, fold into a button.
  */
-export function StopperTags({ fresh, carried, parts }: StopperTagsProps) {
+export function StopperTags({ fresh, carried, parts, question, kits }: StopperTagsProps) {
   const [isOpen, setIsOpen] = useState(false);
   const first = fresh.slice(0, MOST_TAGS);
   const folded = [...fresh.slice(MOST_TAGS), ...carried];
@@ -25,7 +29,12 @@ export function StopperTags({ fresh, carried, parts }: StopperTagsProps) {
     <ul className="mt-1 flex flex-wrap items-center gap-1.5">
       {shown.map((stopper) => (
         <li key={stopper.partNumber} className="max-w-full">
-          <Tag stopper={stopper} part={known.get(stopper.partNumber)} isCarried={carried.includes(stopper)} />
+          <Tag
+            stopper={stopper}
+            part={known.get(stopper.partNumber)}
+            isCarried={carried.includes(stopper)}
+            to={whyAddress({ question, part: stopper.partNumber, kits })}
+          />
         </li>
       ))}
       {folded.length > 0 && (

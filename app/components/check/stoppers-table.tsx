@@ -3,6 +3,7 @@ import type { CheckPageAnswer } from "~/schemas/planning/check-answer";
 import { formatNumber } from "~/utils/format/format-number";
 import { StopperLine } from "./stopper-line";
 import { stopperRows } from "./stopper-rows";
+import { whyAddress } from "./why-address";
 
 const FIRST_SHOWN = 25;
 
@@ -44,6 +45,7 @@ export function StoppersTable({ page }: { page: CheckPageAnswer }) {
                 row={row}
                 asked={page.question.quantity}
                 seesCosts={page.seesCosts}
+                why={whyAddress({ question: page.question, part: row.partNumber })}
               />
             ))}
           </tbody>

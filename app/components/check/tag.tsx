@@ -1,3 +1,4 @@
+import { Link } from "react-router";
 import type { Rung } from "~/domain/planning/types";
 import type { CheckPart } from "~/schemas/planning/check-answer";
 import { formatQuantity } from "~/utils/format/format-quantity";
@@ -8,14 +9,16 @@ interface TagProps {
   part: CheckPart | undefined;
   /** Stops a kit below as well: paler. */
   isCarried: boolean;
+  /** Where the number opens to its causes. */
+  to: string;
 }
 
 /** A tied-on tag: the part number and how many are missing. */
-export function Tag({ stopper, part, isCarried }: TagProps) {
+export function Tag({ stopper, part, isCarried, to }: TagProps) {
   const unit = unitSymbol(part?.unit ?? "EA");
   const ground = isCarried ? "fill-transparent" : "fill-stop-wash";
   return (
-    <span className="flex max-w-full" title={part?.description}>
+    <Link to={to} preventScrollReset className="group flex max-w-full no-underline" title={part?.description}>
       <svg
         viewBox="0 0 12 28"
         aria-hidden="true"
@@ -30,13 +33,13 @@ export function Tag({ stopper, part, isCarried }: TagProps) {
           isCarried ? "" : "bg-stop-wash"
         }`}
       >
-        <span className="truncate">{stopper.partNumber}</span>
+        <span className="truncate group-hover:underline">{stopper.partNumber}</span>
         <span className="shrink-0 font-semibold text-stop">
           {formatQuantity(stopper.missing, part?.decimals ?? 0)}
           {unit === "" ? "" : ` ${unit}`}
           <span className="sr-only"> missing</span>
         </span>
       </span>
-    </span>
+    </Link>
   );
 }

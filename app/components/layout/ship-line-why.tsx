@@ -1,4 +1,5 @@
 import { Link } from "react-router";
+import { whyAddress } from "~/components/check/why-address";
 import type { ShipLineAnswer } from "~/schemas/planning/ship-line";
 import { formatNumber } from "~/utils/format/format-number";
 
@@ -23,7 +24,12 @@ export function ShipLineWhy({ answer }: { answer: ShipLineAnswer }) {
           <ul className="mt-2 grid gap-x-8 gap-y-1 sm:grid-cols-2 lg:grid-cols-4">
             {stoppers.slice(0, MOST_LISTED).map((stopper) => (
               <li key={stopper.partNumber}>
-                <span className="figure font-semibold">{stopper.partNumber}</span>{" "}
+                <Link
+                  to={whyAddress({ question: null, through: next.kitOrder, part: stopper.partNumber })}
+                  className="figure inline-block py-1 font-semibold underline"
+                >
+                  {stopper.partNumber}
+                </Link>{" "}
                 <span className="figure text-foot-stop">{formatNumber(stopper.missing)}</span> missing
               </li>
             ))}

@@ -1,4 +1,4 @@
-import type { ShouldRevalidateFunctionArgs } from "react-router";
+import { Outlet, type ShouldRevalidateFunctionArgs } from "react-router";
 import { CheckPage } from "~/components/check/check-page";
 import { checkQuestionSchema } from "~/schemas/planning/check-answer";
 import { guardedLoader } from "~/services/people/guard.server";
@@ -19,17 +19,24 @@ export const loader = guardedLoader("look", ({ url }: Route.LoaderArgs, person) 
   return getCheckAnswer({ ...kept, problem: asked.error.issues[0].message }, person);
 });
 
-/** While somebody fills in the question, the answers come through the JSON route. */
+const isHere = (pathname: string) => /^\/check(\/|$)/.test(pathname);
+
+/** While somebody fills in the question, or opens a why beside it, the answers come through the JSON route. */
 export function shouldRevalidate({
   currentUrl,
   nextUrl,
   formMethod,
   defaultShouldRevalidate,
 }: ShouldRevalidateFunctionArgs): boolean {
-  const isSamePage = currentUrl.pathname === nextUrl.pathname && formMethod === undefined;
+  const isSamePage = isHere(currentUrl.pathname) && isHere(nextUrl.pathname) && formMethod === undefined;
   return isSamePage ? false : defaultShouldRevalidate;
 }
 
 export default function Check({ loaderData }: Route.ComponentProps) {
-  return <CheckPage first={loaderData} />;
+  return (
+    <>
+      <CheckPage first={loaderData} />
+      <Outlet />
+    </>
+  );
 }

@@ -6,6 +6,7 @@ import type { IsoDate } from "~/domain/planning/types";
 export interface OpenKitOrder {
   number: string;
   partNumber: string;
+  customer: string;
   options: string[];
   serial: string | null;
   wantedOn: IsoDate | null;
@@ -14,8 +15,8 @@ export interface OpenKitOrder {
 }
 
 const OPEN_ORDERS = `
-  SELECT kit_order.number, part.part_number AS partNumber, kit_order.serial, kit_order.wanted_on AS wantedOn,
-    kit_order.priority,
+  SELECT kit_order.number, part.part_number AS partNumber, kit_order.customer, kit_order.serial,
+    kit_order.wanted_on AS wantedOn, kit_order.priority,
     (SELECT GROUP_CONCAT(chosen.option_code ORDER BY chosen.option_code SEPARATOR '\n')
       FROM kit_order_option chosen WHERE chosen.kit_order_id = kit_order.id) AS options
   FROM kit_order

@@ -14,7 +14,7 @@ import { sayStructureProblem } from "./what-if/say-structure-problem";
 type Changes = ShipQuestion["whatIf"];
 
 /** What a plan is made of. */
-export type TriedBook = Pick<PlanBook, "structure" | "supplies">;
+export type TriedBook = Pick<PlanBook, "structure" | "supplies" | "rows">;
 
 /**
  * The book as it would be with the changes; the book itself stays as it is. Throws 422 naming each change
@@ -32,7 +32,8 @@ export function tryWhatIf(book: PlanBook, changes: Changes): TriedBook {
   const supply = changeSupply(structure, book.rows.orders, changes.supply);
   const problems = [stock, supply].flatMap((changed) => (changed.ok ? [] : changed.problems));
   if (!stock.ok || !supply.ok) throw refusal(problems.map(sayProblem));
-  return { structure, supplies: compileSupplies(structure, stock.stock, supply.supply, book.day) };
+  const supplies = compileSupplies(structure, stock.stock, supply.supply, book.day);
+  return { structure, supplies, rows: { stock: stock.stock, orders: supply.supply } };
 }
 
 function groupByParent(lines: readonly PlanLine[]): { parent: string; lines: PlanLine[] }[] {
