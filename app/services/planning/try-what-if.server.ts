@@ -14,7 +14,10 @@ import { sayStructureProblem } from "./what-if/say-structure-problem";
 type Changes = ShipQuestion["whatIf"];
 
 /** What a plan is made of. */
-export type TriedBook = Pick<PlanBook, "structure" | "supplies" | "rows">;
+export type TriedBook = Pick<PlanBook, "structure" | "supplies"> & {
+  /** What the supplies were laid out from, row by row. */
+  rows: Pick<PlanBook["rows"], "stock" | "orders">;
+};
 
 /**
  * The book as it would be with the changes; the book itself stays as it is. Throws 422 naming each change

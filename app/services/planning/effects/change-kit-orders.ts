@@ -30,7 +30,7 @@ export function changeKitOrders(
       const message = `${given} is an order already. Choose another number.`;
       throw refuseChange(`kitOrders.add.${at}.number`, given, message);
     }
-    byNumber.set(given, { ...order, number: given, partNumber: kit });
+    byNumber.set(given, { ...order, number: given, partNumber: kit, customer: "" });
   });
   return [...byNumber.values()].sort(inOrderOfService);
 }
