@@ -18,6 +18,7 @@ export default [
   route("pack/kit-orders/:number/cancel", "routes/pack/cancel-kit-order.tsx"),
 
   // find
+  route("find", "routes/find/search.tsx"),
   route("find/files", "routes/find/files.tsx"),
 
   // api
@@ -26,6 +27,7 @@ export default [
   route("api/effects", "routes/api/effects.ts"),
   route("api/check-answer", "routes/api/check-answer.ts"),
   route("api/why", "routes/api/why.ts"),
+  route("api/find", "routes/api/find.ts"),
   route("api/parts", "routes/api/parts.ts"),
   route("api/parts/:partNumber", "routes/api/part.ts"),
   route("api/structure/:partNumber", "routes/api/structure.ts"),

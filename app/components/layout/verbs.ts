@@ -2,4 +2,5 @@
 export const VERBS = [
   { word: "Check", to: "/check" },
   { word: "Pack", to: "/pack/kit-orders" },
+  { word: "Find", to: "/find" },
 ] as const;

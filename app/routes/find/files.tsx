@@ -1,4 +1,5 @@
 import { FilesPage } from "~/components/files/files-page";
+import { FindPlaces } from "~/components/find/find-places";
 import { getFileKinds } from "~/services/imports/get-file-kinds.server";
 import { guardedLoader } from "~/services/people/guard.server";
 import type { Route } from "./+types/files";
@@ -8,5 +9,10 @@ export const meta: Route.MetaFunction = () => [{ title: "Files in and out · Cot
 export const loader = guardedLoader("look", (_args: Route.LoaderArgs, person) => getFileKinds(person));
 
 export default function Files({ loaderData }: Route.ComponentProps) {
-  return <FilesPage kinds={loaderData} />;
+  return (
+    <>
+      <FindPlaces />
+      <FilesPage kinds={loaderData} />
+    </>
+  );
 }
