@@ -2,7 +2,7 @@ import { expect, test } from "@playwright/test";
 import { openPage, signInAs, watchForFaults } from "../support/browser-session";
 
 /** A serial that no other run of these tests has used. */
-const serial = () => `T${Date.now().toString(36).toUpperCase()}`;
+const serial = () => `T${Date.now()}`;
 
 test("the planner enters, changes and cancels a kit order", async ({ page }) => {
   const faults = watchForFaults(page);
@@ -107,6 +107,9 @@ test("what an order does is said before it is saved, and is so afterwards", asyn
   await page.getByLabel("Priority").fill("");
   await expect(effect).toContainText("Choose a kit and give a priority");
   await page.getByLabel("Priority").fill("1");
+  await page.getByLabel("Serial").fill("blue");
+  await expect(effect).toContainText("End the serial in digits");
+  await page.getByLabel("Serial").fill("");
   await page.getByLabel("Wanted on").fill("2026-01-01");
   await expect(effect).toContainText(/would (be first|become ready|stop at)/);
   const told = await effect.textContent();

@@ -28,7 +28,7 @@ export function EffectLine({ change, waiting, className = "" }: EffectLineProps)
       role="group"
       aria-label="What this does to the ship line"
       aria-busy={isFetching}
-      className={`flex min-h-24 gap-3 border-line border-t pt-3 sm:min-h-16 ${className}`}
+      className={`flex min-h-28 gap-3 border-line border-t pt-3 sm:min-h-16 ${className}`}
     >
       <Shape shape={shape ?? "same"} isFaint={shape === undefined} />
       <p aria-live="polite" className={shape === undefined ? "text-soft" : ""}>
@@ -39,7 +39,12 @@ export function EffectLine({ change, waiting, className = "" }: EffectLineProps)
 }
 
 function say({ text, stops, figure }: EffectWord, at: number) {
-  const look = [figure && "figure text-[0.94em]", stops && "font-bold text-stop"].filter(Boolean).join(" ");
+  const look = [
+    figure && "figure inline-block max-w-full text-[0.94em] wrap-anywhere",
+    stops && "font-bold text-stop",
+  ]
+    .filter(Boolean)
+    .join(" ");
   return look === "" ? (
     text
   ) : (

@@ -1,4 +1,5 @@
 import { z } from "zod";
+import { parseSerial } from "~/domain/planning/netting/serial";
 import { emptyAs } from "~/schemas/fields/empty-as";
 import { isoDate } from "~/schemas/fields/iso-date";
 import { optionCodes } from "~/schemas/fields/option-codes";
@@ -15,7 +16,13 @@ const row = z
     ),
     kit: partNumber,
     customer: text(190),
-    serial: emptyAs(code("a serial", 60), null),
+    serial: emptyAs(
+      code("a serial", 60).refine(
+        (serial) => parseSerial(serial) !== null,
+        "a serial that ends in digits, fifteen at most, such as 098",
+      ),
+      null,
+    ),
     wanted_on: emptyAs(isoDate, null),
     priority: emptyAs(wholeNumber(1, 9_999), 100),
     options: optionCodes,

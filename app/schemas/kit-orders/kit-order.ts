@@ -1,4 +1,5 @@
 import { z } from "zod";
+import { parseSerial } from "~/domain/planning/netting/serial";
 
 const HIGHEST_PRIORITY = 9999;
 
@@ -15,6 +16,7 @@ const textOrNull = (most: number, what: string) =>
     .transform((value) => value ?? null);
 
 const NUMBER_RULE = "Use letters, digits, points, dashes and underscores, such as KO-0042.";
+const SERIAL_RULE = "End the serial in digits, fifteen at most, such as 098 or SC-098.";
 const PRIORITY_RULE = `Give a whole number from 1, which is served first, to 9,999.`;
 
 /** An order of one kit, as the form and other programs send it. */
@@ -26,7 +28,10 @@ export const kitOrderSchema = z.object({
   ),
   kit: text(60, "the kit").min(1, "Choose a kit."),
   options: z.array(text(60, "an option")).max(50, "At most 50 options.").default([]),
-  serial: textOrNull(60, "the serial"),
+  serial: textOrNull(60, "the serial").refine(
+    (value) => value === null || parseSerial(value) !== null,
+    SERIAL_RULE,
+  ),
   wantedOn: z
     .preprocess(
       (value) => (value === "" ? null : value),

@@ -179,6 +179,7 @@ test("options are joined by a plus, each once", () => {
   ]);
   expect(refused(kitOrdersKind, { ...order, options: "NIGHT++HEATER" })).toEqual(["options"]);
   expect(refused(kitOrdersKind, { ...order, number: "KO/1" })).toEqual(["number"]);
+  expect(refused(kitOrdersKind, { ...order, serial: "blue" })).toEqual(["serial"]);
 });
 
 test("mail addresses and currencies", () => {

@@ -104,6 +104,7 @@ describe("entering an order", () => {
     ["options", { kit: "S4", options: ["CAB"] }],
     ["priority", { priority: "soon" }],
     ["priority", { priority: "" }],
+    ["serial", { serial: "blue" }],
     ["wantedOn", { wantedOn: "2027-02-30" }],
     ["number", { number: "KO 1/2" }],
   ])("refuses a wrong %s", async (field, overrides) => {

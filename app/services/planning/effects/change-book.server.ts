@@ -1,5 +1,4 @@
 import { compileSupplies } from "~/domain/planning/compile-supplies";
-import { partKey } from "~/domain/planning/part-key";
 import type { BookChange } from "~/schemas/planning/effects";
 import { nextKitOrderNumber } from "~/services/kit-orders/next-kit-order-number.server";
 import type { PlanBook } from "../get-plan-book.server";
@@ -9,8 +8,8 @@ import { changeBookStructure } from "./change-book-structure";
 import { changeKitOrders } from "./change-kit-orders";
 import { changeOpenOrders } from "./change-open-orders";
 import { changeShelves } from "./change-shelves";
+import { checkOrderedKits } from "./check-ordered-kits";
 import { readLots } from "./read-lots.server";
-import { refuseChange } from "./refuse-change";
 
 /**
  * The book as it would be after the act. Only what the change touches is made again; the book itself stays as
@@ -18,7 +17,7 @@ import { refuseChange } from "./refuse-change";
  */
 export async function changeBook(book: PlanBook, change: BookChange): Promise<LineBook> {
   const structure = changeBookStructure(book, change);
-  checkKits(book, change);
+  checkOrderedKits({ ...book, structure }, change.kitOrders);
   return {
     structure,
     supplies: await changeSupplies({ ...book, structure }, change, structure !== book.structure),
@@ -40,17 +39,4 @@ async function changeSupplies(book: PlanBook, change: BookChange, isRebuilt: boo
 
 async function nextNumberFor({ kitOrders }: BookChange): Promise<string> {
   return kitOrders.add.some(({ number }) => number === null) ? nextKitOrderNumber() : "";
-}
-
-/** Only what is sold as a kit can be ordered. */
-function checkKits({ structure, parts }: PlanBook, { kitOrders }: BookChange): void {
-  for (const list of ["add", "change"] as const) {
-    kitOrders[list].forEach(({ kit }, at) => {
-      if (kit === undefined) return;
-      const number = structure.numberOf.get(partKey(kit));
-      if (number !== undefined && parts[number].sold && parts[number].sourcing === "make") return;
-      const message = `${kit} is no kit that can be ordered. Choose one of the list.`;
-      throw refuseChange(`kitOrders.${list}.${at}.kit`, kit, message);
-    });
-  }
 }

@@ -220,6 +220,21 @@ const acts: [string, BookChangeInput, () => Promise<unknown>][] = [
     () => bring("structure", "parent,component,quantity\nDRIVE,BOLT,2\n"),
   ],
   [
+    "an option that the structure no longer offers to orders that have it",
+    {
+      structure: [
+        {
+          parent: "KIT",
+          lines: [
+            { component: "DRIVE", quantity: "1" },
+            { component: "BOLT", quantity: "2" },
+          ],
+        },
+      ],
+    },
+    () => bring("structure", "parent,component,quantity\nKIT,DRIVE,1\nKIT,BOLT,2\n"),
+  ],
+  [
     "everything at once",
     {
       stock: [{ partNumber: "BOLT", change: "+6" }],
@@ -267,7 +282,7 @@ describe("what an act would do", () => {
     await bring("supply", "part_number,quantity,due,reference\nDRIVE,2,2999-01-05,SO-1\n");
     await database.query(
       `INSERT INTO shop_order_component (shop_order_id, part_id, promised, picked)
-       SELECT shop_order.id, part.id, 5, 3 FROM shop_order JOIN part ON part.part_number = 'BOLT'`,
+       SELECT shop_order.id, part.id, 8, 3 FROM shop_order JOIN part ON part.part_number = 'BOLT'`,
     );
     await raiseOrders();
     const told = await preview({ stock: [{ partNumber: "BOLT", change: "-9" }] });
@@ -311,6 +326,12 @@ test("an order saved as it is has no effect to speak of", async () => {
   const told = await preview({ kitOrders: { change: [{ number: "KO-0004", priority: 40, options: [] }] } });
   expect(told).toMatchObject({ own: [], stop: [], becomeReady: [] });
   expect(told.after).toEqual(told.before);
+});
+
+test("an order that was stored with a serial of another kind hides no other", async () => {
+  await database.query("UPDATE kit_order SET serial = 'blue' WHERE number = 'KO-0002'");
+  await raiseOrders();
+  expect(await shipLine()).toMatchObject({ ready: 3, of: 5 });
 });
 
 test("nothing is stored, and the book stays as it is", async () => {
@@ -365,6 +386,12 @@ test.each([
     /decimals/,
   ],
   ["a kit that is none", { kitOrders: { add: [order({ kit: "DRIVE" })] } }, "kitOrders.add.0.kit", /no kit/],
+  [
+    "an option that the kit has not",
+    { kitOrders: { add: [order({ options: ["FLOATS"] })] } },
+    "kitOrders.add.0.options",
+    /no option FLOATS/,
+  ],
   [
     "a number that is taken",
     { kitOrders: { add: [order({ number: "KO-0001" })] } },
