@@ -6,6 +6,17 @@ export default [
   route("sign-in", "routes/auth/sign-in.tsx"),
   route("sign-out", "routes/auth/sign-out.ts"),
   route("set-up", "routes/auth/set-up.tsx"),
+  route("welcome/:token", "routes/auth/welcome.tsx"),
+  route("forgotten", "routes/auth/forgotten.tsx"),
+  route("new-password/:token", "routes/auth/new-password.tsx"),
+
+  // admin
+  route("admin/people", "routes/admin/people.tsx"),
+  route("admin/people/:id", "routes/admin/person.tsx"),
+  route("admin/mail", "routes/admin/mail.tsx"),
+  route("admin/mail/:id", "routes/admin/mail-text.tsx"),
+  route("admin/audit", "routes/admin/audit.tsx"),
+  route("admin/audit.csv", "routes/admin/audit-file.ts"),
 
   // check
   route("check", "routes/check/check.tsx", [route("why", "routes/check/why.tsx")]),

@@ -5,6 +5,7 @@ import { createRequestHandler } from "@react-router/express";
 import compression from "compression";
 import express, { type ErrorRequestHandler, type Express } from "express";
 import type { ServerBuild } from "react-router";
+import { startMailWorker } from "~/services/mail/start-mail-worker.server";
 import { readEnv } from "~/utils/env";
 import { describeError, log } from "~/utils/http-log.server";
 import { ADDRESS_HEADER } from "~/utils/request-address";
@@ -95,13 +96,14 @@ function listen(application: Express, host: string, port: number): Promise<Serve
   });
 }
 
-/** Says no to new work, lets running requests end, closes the database's connections. */
-async function leave(server: Server): Promise<void> {
+/** Says no to new work, lets running requests and a mail that is being sent end, closes the database's connections. */
+async function leave(server: Server, mail: ReturnType<typeof startMailWorker>): Promise<void> {
   globalThis.__cotterpinDraining = true;
   log.info("draining");
+  const mailStopped = mail.stop();
   await wait(noticeTime);
   const closed = new Promise<void>((resolve) => server.close(() => resolve()));
-  await Promise.race([closed, wait(drainLimit)]);
+  await Promise.race([Promise.all([closed, mailStopped]), wait(drainLimit)]);
   server.closeAllConnections();
   const { __cotterpinClose } = globalThis as { __cotterpinClose?: () => Promise<void> };
   await Promise.race([__cotterpinClose?.(), wait(closeLimit)]);
@@ -116,10 +118,11 @@ async function main(): Promise<void> {
   const env = readEnv();
   const build: ServerBuild = await import(pathToFileURL(path.join(folder, "server/index.js")).href);
   const server = await listen(makeApplication(build, env.publicUrl), env.host, env.port);
+  const mail = startMailWorker();
   const stop = (code: number) => {
     if (leaving) return;
     leaving = true;
-    leave(server).finally(() => process.exit(code));
+    leave(server, mail).finally(() => process.exit(code));
   };
   for (const signal of ["SIGTERM", "SIGINT"] as const) process.on(signal, () => stop(0));
   // The starter is gone: nobody else would stop us.

@@ -26,6 +26,7 @@ const schema = z.object({
   DATABASE_URL: databaseUrl,
   DATABASE_MIGRATE_URL: databaseUrl,
   SMTP_URL: text,
+  MAIL_FROM: text,
   SESSION_SECRET: text,
   PUBLIC_URL: z.preprocess(blankToUndefined, z.url().optional()),
 });
@@ -40,6 +41,8 @@ export interface Env {
   /** The user that may change tables; the application's own where none is named. */
   databaseMigrateUrl: string | undefined;
   smtpUrl: string | undefined;
+  /** Who mail comes from; made of the public address where none is named. */
+  mailFrom: string | undefined;
   sessionSecret: string | undefined;
   publicUrl: string | undefined;
 }
@@ -63,6 +66,7 @@ export function readEnv(source: Record<string, string | undefined> = process.env
     databaseUrl: env.DATABASE_URL,
     databaseMigrateUrl: env.DATABASE_MIGRATE_URL ?? env.DATABASE_URL,
     smtpUrl: env.SMTP_URL,
+    mailFrom: env.MAIL_FROM,
     sessionSecret: env.SESSION_SECRET,
     publicUrl: env.PUBLIC_URL,
   };

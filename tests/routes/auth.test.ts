@@ -42,9 +42,12 @@ describe("every route", async () => {
     expect(open.map(({ id }) => id).sort()).toEqual([
       "root",
       "routes/api/health",
+      "routes/auth/forgotten",
+      "routes/auth/new-password",
       "routes/auth/set-up",
       "routes/auth/sign-in",
       "routes/auth/sign-out",
+      "routes/auth/welcome",
       "routes/not-found",
     ]);
   });

@@ -1,16 +1,24 @@
 import { useRef } from "react";
-import { Form } from "react-router";
+import { Form, Link } from "react-router";
 import { useCloseDetails } from "~/hooks/use-close-details";
 import { ThemeChoice } from "./theme-choice";
 
 export interface NameMenuProps {
-  person: { name: string; roles: readonly string[] };
+  person: { name: string; roles: readonly string[]; may: readonly string[] };
 }
+
+/** What the manager keeps; each stands here for those who may do its act. */
+const MANAGING = [
+  { act: "people", word: "People", to: "/admin/people" },
+  { act: "settings", word: "Mail", to: "/admin/mail" },
+  { act: "audit", word: "Audit", to: "/admin/audit" },
+] as const;
 
 /** Behind the person's name: who is signed in, light or dark, the way out. */
 export function NameMenu({ person }: NameMenuProps) {
   const menu = useRef<HTMLDetailsElement>(null);
   useCloseDetails(menu);
+  const places = MANAGING.filter(({ act }) => person.may.includes(act));
   const [firstName] = person.name.split(" ");
   return (
     <details ref={menu} className="group relative shrink-0">
@@ -26,6 +34,17 @@ export function NameMenu({ person }: NameMenuProps) {
       <div className="absolute right-0 top-full z-30 w-64 border border-edge bg-sheet p-4">
         <p className="font-bold">{person.name}</p>
         <p className="text-soft">{person.roles.join(", ")}</p>
+        {places.length > 0 && (
+          <ul className="mt-3 border-line border-y py-1">
+            {places.map(({ word, to }) => (
+              <li key={to}>
+                <Link to={to} className="flex min-h-11 items-center underline">
+                  {word}
+                </Link>
+              </li>
+            ))}
+          </ul>
+        )}
         <ThemeChoice />
         {/* A whole new page, so that nothing this person has seen stays behind in the browser's memory. */}
         <Form method="post" action="/sign-out" reloadDocument>

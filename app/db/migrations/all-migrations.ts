@@ -1,6 +1,7 @@
 import { createOrders } from "./create-orders";
 import { createParts } from "./create-parts";
 import { createPeople } from "./create-people";
+import { createPersonLinks } from "./create-person-links";
 import { createStock } from "./create-stock";
 import { createSystem } from "./create-system";
 import type { Migration } from "./migration";
@@ -14,4 +15,5 @@ export const ALL_MIGRATIONS: readonly Migration[] = [
   createStock,
   createOrders,
   refuseChangedFacts,
+  createPersonLinks,
 ];

@@ -27,3 +27,19 @@ export const setUpSchema = z.object({
   email: emailSchema,
   password: newPasswordSchema,
 });
+
+const rolesSchema = z
+  .array(roleSchema, { error: "Give at least one role." })
+  .min(1, "Give at least one role.")
+  .transform((roles) => [...new Set(roles)]);
+
+/** A person to be invited: the password is theirs to choose. */
+export const invitePersonSchema = z.object({ name: nameSchema, email: emailSchema, roles: rolesSchema });
+
+export const changeRolesSchema = z.object({ roles: rolesSchema });
+
+export const choosePasswordSchema = z.object({ password: newPasswordSchema });
+
+export const acceptInvitationSchema = z.object({ name: nameSchema, password: newPasswordSchema });
+
+export const forgottenSchema = z.object({ email: emailSchema });

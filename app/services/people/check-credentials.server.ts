@@ -22,7 +22,7 @@ export async function checkCredentials({ email, password, address }: Credentials
   if (!person || !fits) {
     throw new AppError(
       "invalid",
-      "This e-mail address and password do not go together. Try again, or ask a manager for a new password.",
+      "This e-mail address and password do not go together. Try again, or have a link for a new password sent to you.",
     );
   }
   await forgiveAttempt(attempt);

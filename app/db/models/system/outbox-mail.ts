@@ -14,11 +14,14 @@ export class OutboxMail extends Model<InferAttributes<OutboxMail>, InferCreation
   declare toAddress: string;
   declare subject: string;
   declare body: string;
-  declare state: CreationOptional<"waiting" | "sent" | "dead">;
+  declare state: CreationOptional<"waiting" | "sent" | "caught" | "dead">;
   declare tries: CreationOptional<number>;
   declare nextAt: CreationOptional<Date>;
   declare leaseUntil: CreationOptional<Date | null>;
   declare createdAt: CreationOptional<Date>;
+  declare endedAt: CreationOptional<Date | null>;
+  /** Why the last try failed. */
+  declare fault: CreationOptional<string | null>;
 }
 
 OutboxMail.init(
@@ -28,11 +31,13 @@ OutboxMail.init(
     toAddress: { type: DataTypes.STRING(190), allowNull: false },
     subject: { type: DataTypes.STRING(255), allowNull: false },
     body: { type: DataTypes.TEXT, allowNull: false },
-    state: DataTypes.ENUM("waiting", "sent", "dead"),
+    state: DataTypes.ENUM("waiting", "sent", "caught", "dead"),
     tries: DataTypes.INTEGER,
     nextAt: DataTypes.DATE(3),
     leaseUntil: DataTypes.DATE(3),
     createdAt: DataTypes.DATE(3),
+    endedAt: DataTypes.DATE(3),
+    fault: DataTypes.STRING(255),
   },
   { sequelize, tableName: "outbox" },
 );

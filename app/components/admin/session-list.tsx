@@ -1,0 +1,43 @@
+import { Form } from "react-router";
+import { formatMoment } from "~/utils/format/format-moment";
+
+/** Where a person is signed in, each with a button that ends it. */
+export function SessionList({
+  sessions,
+}: {
+  sessions: { key: string; createdAt: string; seenAt: string }[];
+}) {
+  return (
+    <section className="sheet" aria-label="Sessions">
+      <h2 className="text-lg">Sessions</h2>
+      {sessions.length === 0 && <p className="mt-2 text-soft">Not signed in anywhere just now.</p>}
+      <ul>
+        {sessions.map(({ key, createdAt, seenAt }) => (
+          <li
+            key={key}
+            className="flex flex-wrap items-center justify-between gap-x-6 gap-y-2 border-line border-b py-3 last:border-b-0"
+          >
+            <p>
+              Last seen <span className="figure">{formatMoment(seenAt)}</span>
+              <span className="block text-[0.9375rem] text-soft">
+                began <span className="figure">{formatMoment(createdAt)}</span>
+              </span>
+            </p>
+            <Form method="post">
+              <input type="hidden" name="session" value={key} />
+              <button
+                type="submit"
+                name="intent"
+                value="end-session"
+                className="button"
+                aria-label={`End the session begun ${formatMoment(createdAt)}`}
+              >
+                End
+              </button>
+            </Form>
+          </li>
+        ))}
+      </ul>
+    </section>
+  );
+}
