@@ -158,6 +158,7 @@ describe("POST /api/ship-check", () => {
     ["an unknown lot", { hold: [{ partNumber: "BOLT", lot: "L9" }] }, /lot L9/],
     ["an unknown order", { supply: [{ reference: "PO-9", due: null }] }, /number PO-9/],
     ["a loop", { structure: [{ parent: "DRIVE", component: "KIT", quantity: "1" }] }, /DRIVE > KIT > DRIVE/],
+    ["half a lamp", { structure: [{ parent: "KIT", component: "LAMP", quantity: "0.5" }] }, /0 decimals/],
     ["a new part without sourcing", { parts: [{ part_number: "NUT" }] }, /say its sourcing/],
     ["an unknown column", { parts: [{ part_number: "BOLT", colour: "red" }] }, /valid/],
   ])("refuses %s", async (_, whatIf, sentence) => {

@@ -1,15 +1,12 @@
 import { compileSupplies } from "~/domain/planning/compile-supplies";
 import { partKey } from "~/domain/planning/part-key";
-import type { PlanLine } from "~/domain/planning/types";
 import { changeStock } from "~/domain/planning/what-if/change-stock";
-import { changeStructure } from "~/domain/planning/what-if/change-structure";
 import { changeSupply } from "~/domain/planning/what-if/change-supply";
 import type { WhatIfProblem } from "~/domain/planning/what-if/what-if";
 import type { ShipQuestion } from "~/schemas/planning/what-if";
 import { AppError, type FieldError } from "~/utils/errors";
 import type { PlanBook } from "./get-plan-book.server";
-import { changeBookPart } from "./what-if/change-book-part";
-import { sayStructureProblem } from "./what-if/say-structure-problem";
+import { changeBookStructure } from "./what-if/change-book-structure";
 
 type Changes = ShipQuestion["whatIf"];
 
@@ -25,12 +22,12 @@ export type TriedBook = Pick<PlanBook, "structure" | "supplies"> & {
  */
 export function tryWhatIf(book: PlanBook, changes: Changes): TriedBook {
   if (Object.values(changes).every((list) => list.length === 0)) return book;
-  const compiled = changeStructure(book.structure, {
-    parts: changes.parts.map((change) => changeBookPart(book.structure, change, "whatIf.parts")),
-    structure: groupByParent(changes.structure),
-  });
-  if (!compiled.ok) throw refusal(compiled.problems.map((problem) => sayStructureProblem(problem, "whatIf")));
-  const { structure } = compiled;
+  const { parts } = changes;
+  const structure = changeBookStructure(
+    book,
+    { parts, structure: groupByParent(changes.structure) },
+    "whatIf",
+  );
   const stock = changeStock(structure, book.rows.stock, changes);
   const supply = changeSupply(structure, book.rows.orders, changes.supply);
   const problems = [stock, supply].flatMap((changed) => (changed.ok ? [] : changed.problems));
@@ -39,8 +36,8 @@ export function tryWhatIf(book: PlanBook, changes: Changes): TriedBook {
   return { structure, supplies, rows: { stock: stock.stock, orders: supply.supply } };
 }
 
-function groupByParent(lines: readonly PlanLine[]): { parent: string; lines: PlanLine[] }[] {
-  const byParent = new Map<string, { parent: string; lines: PlanLine[] }>();
+function groupByParent(lines: Changes["structure"]): { parent: string; lines: Changes["structure"] }[] {
+  const byParent = new Map<string, { parent: string; lines: Changes["structure"] }>();
   for (const line of lines) {
     const key = partKey(line.parent);
     const group = byParent.get(key) ?? { parent: line.parent, lines: [] };

@@ -4,7 +4,7 @@ import { nextKitOrderNumber } from "~/services/kit-orders/next-kit-order-number.
 import type { PlanBook } from "../get-plan-book.server";
 import { layOutStock } from "../lay-out-stock";
 import type { LineBook } from "../ship-line/plan-kit-orders";
-import { changeBookStructure } from "./change-book-structure";
+import { changeBookStructure } from "../what-if/change-book-structure";
 import { changeKitOrders } from "./change-kit-orders";
 import { changeOpenOrders } from "./change-open-orders";
 import { changeShelves } from "./change-shelves";
@@ -16,7 +16,7 @@ import { readLots } from "./read-lots.server";
  * it is. Throws 422 naming what cannot be done.
  */
 export async function changeBook(book: PlanBook, change: BookChange): Promise<LineBook> {
-  const structure = changeBookStructure(book, change);
+  const structure = changeBookStructure(book, change, "change");
   checkOrderedKits({ ...book, structure }, change.kitOrders);
   return {
     structure,
