@@ -46,6 +46,7 @@ export default [
   route("api/imports/:kind", "routes/api/imports.ts"),
   route("api/exports/book", "routes/api/export-book.ts"),
   route("api/exports/:kind", "routes/api/exports.ts"),
+  route("api/openapi.json", "routes/api/openapi.ts"),
   route("api/health", "routes/api/health.ts"),
 
   route("*", "routes/not-found.tsx"),

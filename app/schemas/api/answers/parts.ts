@@ -1,0 +1,74 @@
+import { z } from "zod";
+import { count, dayText, decimalText, sourcing } from "./values";
+
+const part = z.object({
+  partNumber: z.string(),
+  description: z.string(),
+  sourcing,
+  unit: z.string(),
+  decimals: count,
+  leadTimeDays: count,
+  safetyStock: decimalText,
+  lotRule: z.string(),
+  lotMinimum: decimalText.nullable(),
+  lotMultiple: decimalText.nullable(),
+  lotMaximum: decimalText.nullable(),
+  lotDays: count.nullable(),
+  yield: decimalText,
+  unitCost: decimalText.nullable(),
+  massKg: decimalText.nullable(),
+  sold: z.boolean(),
+});
+
+export const partsAnswer = z.object({ page: count, size: count, total: count, parts: z.array(part) });
+
+const whereUsedLine = z.object({
+  partNumber: z.string(),
+  description: z.string(),
+  quantity: decimalText.nullable(),
+  option: z.string().nullable(),
+  fromSerial: z.string().nullable(),
+  toSerial: z.string().nullable(),
+});
+
+export const whereUsedAnswer = z.object({ partNumber: z.string(), parents: z.array(whereUsedLine) });
+
+const balance = z.object({
+  bin: z.string(),
+  lot: z.string().nullable(),
+  state: z.string(),
+  quantity: decimalText,
+  expiresOn: dayText.nullable(),
+});
+
+const openOrder = z.object({
+  reference: z.string(),
+  quantity: decimalText,
+  due: dayText.nullable(),
+  supplier: z.string().nullable(),
+});
+
+export const partAnswer = part.extend({
+  balances: z.array(balance),
+  promised: z.array(z.object({ reference: z.string(), quantity: decimalText })),
+  onOrder: z.array(openOrder),
+  whereUsed: z.array(whereUsedLine),
+});
+
+/** A tree: a part repeats wherever it stands. */
+export const structureAnswer = z.object({
+  partNumber: z.string(),
+  description: z.string(),
+  sourcing,
+  unit: z.string(),
+  quantity: decimalText.nullable(),
+  scrap: decimalText.nullable(),
+  option: z.string().nullable(),
+  fromSerial: z.string().nullable(),
+  toSerial: z.string().nullable(),
+  fromDate: dayText.nullable(),
+  toDate: dayText.nullable(),
+  get components() {
+    return z.array(structureAnswer);
+  },
+});
