@@ -103,6 +103,7 @@ describe("the document of the JSON routes", () => {
     ["getCheckAnswer", "/api/check-answer?kit=KIT&quantity=5&by=2999-01-01"],
     ["getWhy", "/api/why?kit=KIT&quantity=5&part=BOLT"],
     ["getWhy", "/api/why?through=KO-4&part=BOLT&with=orders"],
+    ["searchEverything", "/api/find?q=bolt"],
     ["findParts", "/api/parts"],
     ["getPart", "/api/parts/BOLT"],
     ["getStructure", "/api/structure/KIT"],

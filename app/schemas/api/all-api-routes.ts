@@ -1,6 +1,7 @@
 import type { ApiRoute } from "./api-route";
 import { exportsRoutes } from "./files/exports";
 import { importsRoutes } from "./files/imports";
+import { findRoutes } from "./parts/find";
 import { partsRoutes } from "./parts/parts";
 import { structureRoutes } from "./parts/structure";
 import { checkAnswerRoutes } from "./planning/check-answer";
@@ -18,6 +19,7 @@ export const ALL_API_ROUTES: readonly ApiRoute[] = [
   ...effectsRoutes,
   ...checkAnswerRoutes,
   ...whyRoutes,
+  ...findRoutes,
   ...partsRoutes,
   ...structureRoutes,
   ...importsRoutes,
