@@ -75,7 +75,7 @@ function stopperWords({ stoppers }: Pick<PlannedKitOrder, "stoppers">): EffectWo
   const also =
     others.length === 0
       ? ""
-      : ` and ${cardinal(others.length)} other ${others.length === 1 ? "part" : "parts"}`;
+      : `, and ${cardinal(others.length)} other ${others.length === 1 ? "part" : "parts"}`;
   return [
     { text: first.partNumber, figure: true },
     { text: `, ${formatNumber(first.missing)} missing${also}` },

@@ -63,7 +63,7 @@ describe("what an act does to the ship line, in words", () => {
   test("several kits that stop, and several parts", () => {
     const first = { ...waits("KO-0151"), stoppers: [...waits("").stoppers, ...waits("", "CL-1").stoppers] };
     expect(said({ after: line({ ready: 4 }), stop: [first, waits("KO-0152")] })).toBe(
-      "stops: Ship line 6 → 4 of 10 ready. KO-0151 would stop at HB-2041, 2 missing and one other part, and one more after it.",
+      "stops: Ship line 6 → 4 of 10 ready. KO-0151 would stop at HB-2041, 2 missing, and one other part, and one more after it.",
     );
   });
 
