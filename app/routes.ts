@@ -37,6 +37,7 @@ export default [
   route("api/ship-line", "routes/api/ship-line.ts"),
   route("api/effects", "routes/api/effects.ts"),
   route("api/check-answer", "routes/api/check-answer.ts"),
+  route("api/check-csv", "routes/api/check-csv.ts"),
   route("api/why", "routes/api/why.ts"),
   route("api/find", "routes/api/find.ts"),
   route("api/parts", "routes/api/parts.ts"),

@@ -50,9 +50,11 @@ export function buildCheckAnswer({
   }
 
   return {
-    question: { kit: "S2", quantity, by: due, options: [] },
+    question: { kit: "S2", quantity, by: due, options: [], ifs: [] },
     problem: null,
     readyByDate: null,
+    ifs: [],
+    without: null,
     kits: [
       { partNumber: "S2", description: "Two-seat craft", options: [{ code: "CAB", description: "Cabin" }] },
       { partNumber: "S4", description: "Four-seat craft", options: [] },

@@ -8,6 +8,7 @@ import { Ladder } from "./ladder";
 import { QuestionSentence } from "./question-sentence";
 import { StoppersTable } from "./stoppers-table";
 import { Warnings } from "./warnings";
+import { WhatIfs } from "./what-ifs";
 
 /** Check: a question to fill in, its answer in a sentence, and under it the picture and the reasons. */
 export function CheckPage({ first }: { first: CheckPageAnswer }) {
@@ -24,6 +25,7 @@ export function CheckPage({ first }: { first: CheckPageAnswer }) {
             {error.message} What is shown is the answer before it.
           </p>
         )}
+        <WhatIfs question={question} page={page} onAsk={ask} />
         {page.answer !== null && <Reasons page={page} />}
       </div>
     </>

@@ -7,5 +7,6 @@ export function checkSearch(question: CheckQuestion): string {
   search.set("quantity", String(question.quantity));
   if (question.by !== null) search.set("by", question.by);
   if (question.options.length > 0) search.set("options", question.options.join(","));
+  for (const one of question.ifs) search.append("if", one);
   return search.toString();
 }

@@ -13,6 +13,7 @@ export function readQuestion(search: URLSearchParams, asked: CheckQuestion): Che
       .getAll("options")
       .flatMap((codes) => codes.split(","))
       .filter((code) => code !== ""),
+    ifs: search.getAll("if"),
   };
 }
 

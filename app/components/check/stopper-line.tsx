@@ -8,10 +8,12 @@ interface StopperLineProps {
   seesCosts: boolean;
   /** Where its numbers open to their causes. */
   why: string;
+  /** Where the same question is asked as if it were all here. */
+  ifHere: string;
 }
 
 /** One part that stops kits: a table row at a desk, a small sheet on a phone. */
-export function StopperLine({ row, asked, seesCosts, why }: StopperLineProps) {
+export function StopperLine({ row, asked, seesCosts, why, ifHere }: StopperLineProps) {
   const unit = row.unit === "" ? "" : `, ${row.unit}`;
   return (
     <tr className="border-line border-b align-top max-lg:grid max-lg:grid-cols-3 sm:max-lg:grid-cols-6 max-lg:gap-x-4 max-lg:gap-y-2 max-lg:py-4">
@@ -23,6 +25,14 @@ export function StopperLine({ row, asked, seesCosts, why }: StopperLineProps) {
         {row.supplier !== null && (
           <span className="block text-[0.9375rem] text-soft leading-snug">{row.supplier}</span>
         )}
+        <Link
+          to={ifHere}
+          preventScrollReset
+          aria-label={`What if all ${row.partNumber} were here`}
+          className="block w-fit text-[0.9375rem] text-soft underline decoration-dotted hover:text-ink print:hidden"
+        >
+          what if it were here
+        </Link>
         {row.note !== null && <span className="block text-[0.9375rem] leading-snug">{row.note}</span>}
       </th>
       <td className="max-lg:col-span-full lg:pt-[1.15rem] lg:pr-4 lg:pb-3">

@@ -1,5 +1,6 @@
 import type { Shortage } from "~/domain/planning/types";
 import type { CheckPageAnswer, CheckPart } from "~/schemas/planning/check-answer";
+import { formatIf } from "~/schemas/planning/if-text";
 import { alignOnPoint } from "~/utils/format/align-on-point";
 import { formatDate } from "~/utils/format/format-date";
 import { formatMoney } from "~/utils/format/format-money";
@@ -21,6 +22,8 @@ export interface StopperRow {
   hereOn: string;
   hereOnIso: string;
   cost: string | null;
+  /** All that is missing, as a change to try. */
+  ifHere: string;
   /** What the figures alone would leave open. */
   note: string | null;
 }
@@ -47,6 +50,7 @@ export function stopperRows(page: CheckPageAnswer): StopperRow[] {
         isShort: Number(shortage.short) > 0,
         hereOn: formatDate(shortage.readyOn, { today: page.answer?.today, short: true }),
         hereOnIso: shortage.readyOn,
+        ifHere: formatIf({ kind: "stock", partNumber, change: `+${shortage.missing}` }),
         note: noteOn(shortage, part),
         cost: part?.cost == null ? null : formatMoney(part.cost),
       },

@@ -1,6 +1,7 @@
 import { useState } from "react";
 import type { CheckPageAnswer } from "~/schemas/planning/check-answer";
 import { formatNumber } from "~/utils/format/format-number";
+import { checkSearch } from "./check-search";
 import { StopperLine } from "./stopper-line";
 import { stopperRows } from "./stopper-rows";
 import { whyAddress } from "./why-address";
@@ -45,6 +46,7 @@ export function StoppersTable({ page }: { page: CheckPageAnswer }) {
                 row={row}
                 asked={page.question.quantity}
                 seesCosts={page.seesCosts}
+                ifHere={`/check?${checkSearch({ ...page.question, ifs: [...page.question.ifs, row.ifHere] })}`}
                 why={whyAddress({ question: page.question, part: row.partNumber })}
               />
             ))}

@@ -4,8 +4,9 @@ import { getCheckAnswer } from "~/services/planning/get-check-answer.server";
 import { parseInput } from "~/utils/request-body";
 import type { Route } from "./+types/check-answer";
 
-/** `GET /api/check-answer?kit=S2&quantity=10[&by=DATE][&options=A,B]`: what the page Check shows. */
+/** `GET /api/check-answer?kit=S2&quantity=10[&by=DATE][&options=A,B][&if=CHANGE]`: what the page Check shows. */
 export const loader = apiLoader("look", ({ url }: Route.LoaderArgs, person) => {
-  const asked = parseInput(checkQuestionSchema, Object.fromEntries(url.searchParams));
+  const search = { ...Object.fromEntries(url.searchParams), ifs: url.searchParams.getAll("if") };
+  const asked = parseInput(checkQuestionSchema, search);
   return getCheckAnswer(asked, person);
 });

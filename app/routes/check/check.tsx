@@ -11,7 +11,7 @@ export const meta: Route.MetaFunction = () => [{ title: "Check · Cotterpin" }];
 export const loader = guardedLoader("look", ({ url }: Route.LoaderArgs, person) => {
   const search = Object.fromEntries(url.searchParams);
   const options = url.searchParams.getAll("options").join(",");
-  const asked = checkQuestionSchema.safeParse({ ...search, options });
+  const asked = checkQuestionSchema.safeParse({ ...search, options, ifs: url.searchParams.getAll("if") });
   if (asked.success) return getCheckAnswer(asked.data, person);
   const wrong = new Set(asked.error.issues.map((issue) => issue.path[0]));
   const rest = Object.fromEntries(Object.entries(search).filter(([name]) => !wrong.has(name)));

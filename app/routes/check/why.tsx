@@ -12,10 +12,10 @@ export const meta: Route.MetaFunction = ({ loaderData }) => [
 ];
 
 /** Where the address asks what cannot be, the panel says so and Check stays as it is. */
-export const loader = guardedLoader("look", async ({ url }: Route.LoaderArgs) => {
+export const loader = guardedLoader("look", async ({ url }: Route.LoaderArgs, person) => {
   try {
     const query = parseInput(whyQuerySchema, readWhyQuery(url.searchParams));
-    return { why: await getWhy(query), via: query.via, problem: null };
+    return { why: await getWhy(query, person), via: query.via, problem: null };
   } catch (error) {
     if (!(error instanceof AppError)) throw error;
     return { why: null, via: [], problem: error.message };

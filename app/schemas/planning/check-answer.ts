@@ -3,6 +3,7 @@ import type { DecimalString, IsoDate, ShipCheck, Sourcing } from "~/domain/plann
 
 /** Most kits one question may ask for; the ladder has a rung for each. */
 const MOST_KITS = 1000;
+const MOST_IFS = 30;
 
 const blankIsAbsent = (value: unknown) => (value === "" || value === null ? undefined : value);
 
@@ -28,6 +29,10 @@ export const checkQuestionSchema = z.object({
       .map((code) => code.trim())
       .filter((code) => code !== ""),
   ),
+  ifs: z
+    .array(z.string().max(300, "A change to try is at most 300 characters long."))
+    .max(MOST_IFS, `Try at most ${MOST_IFS} changes at a time.`)
+    .default([]),
 });
 
 /** What Check asks, with its gaps filled: null `kit` only where the book has no kit at all. */
@@ -36,6 +41,22 @@ export interface CheckQuestion {
   quantity: number;
   by: IsoDate | null;
   options: string[];
+  /** Changes to try, as `if-text` writes them. */
+  ifs: string[];
+}
+
+/** A change to try; with a problem it is left out of the answer. */
+export interface CheckIf {
+  text: string;
+  problem: string | null;
+}
+
+/** The answer as it is without the changes that are tried. */
+export interface WithoutIfs {
+  buildable: number | null;
+  earliest: IsoDate;
+  /** Of all kits asked for; null for people who may not see costs. */
+  cost: DecimalString | null;
 }
 
 /** A part that the answer speaks of. Costs are null where unknown, and for people who may not see them. */
@@ -77,4 +98,7 @@ export interface CheckPageAnswer {
   seesCosts: boolean;
   /** How many of the kits can be ready by the date asked for; null without a date. */
   readyByDate: number | null;
+  ifs: CheckIf[];
+  /** Null where nothing is tried. */
+  without: WithoutIfs | null;
 }

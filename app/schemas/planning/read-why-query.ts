@@ -4,5 +4,6 @@ export function readWhyQuery(search: URLSearchParams): Record<string, unknown> {
     ...Object.fromEntries(search),
     options: search.getAll("options").join(","),
     via: search.getAll("via"),
+    ifs: search.getAll("if"),
   };
 }

@@ -59,7 +59,8 @@ const supplyChange = z.union([
   z.strictObject({ partNumber, quantity: positiveQuantity, due: optionalDate }),
 ]);
 
-const whatIf = z.strictObject({
+/** Changes that are tried on the book and never stored. */
+export const whatIfSchema = z.strictObject({
   stock: z
     .array(z.strictObject({ partNumber, change: signedQuantity }))
     .max(MOST_ENTRIES)
@@ -92,7 +93,7 @@ export const shipQuestionSchema = z.strictObject({
   demand: z.array(demand).min(1, "Ask for at least one kit.").max(MOST_ENTRIES),
   after: z.enum(["nothing", "open-orders"]).default("nothing"),
   sharing: z.enum(["strict", "release"]).default("strict"),
-  whatIf: whatIf.default({ stock: [], hold: [], supply: [], parts: [], structure: [] }),
+  whatIf: whatIfSchema.default({ stock: [], hold: [], supply: [], parts: [], structure: [] }),
 });
 
 export type ShipQuestion = z.output<typeof shipQuestionSchema>;

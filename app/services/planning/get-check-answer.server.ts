@@ -7,7 +7,13 @@ import { offeredOptions } from "~/domain/planning/netting/split-demand";
 import { partKey } from "~/domain/planning/part-key";
 import type { ShipPlan } from "~/domain/planning/plan-ship";
 import type { ShipCheck } from "~/domain/planning/types";
-import type { CheckKit, CheckPageAnswer, CheckPart, CheckQuestion } from "~/schemas/planning/check-answer";
+import type {
+  CheckKit,
+  CheckPageAnswer,
+  CheckPart,
+  CheckQuestion,
+  WithoutIfs,
+} from "~/schemas/planning/check-answer";
 import type { CurrentPerson } from "~/services/people/current-person";
 import { mayDo } from "~/services/people/permissions";
 import { AppError } from "~/utils/errors";
@@ -15,18 +21,21 @@ import type { PlanBook } from "./get-plan-book.server";
 import { getPlanBook } from "./get-plan-book.server";
 import { hideCosts } from "./hide-costs";
 import { planDemand } from "./plan-demand.server";
+import { tryIfs } from "./what-if/try-ifs.server";
 
-interface Asked {
+/** What Check is asked. */
+export interface AskedCheck {
   /** What the address asks that cannot be: said instead of an answer. */
   problem?: string;
   kit?: string;
   quantity: number;
   by?: string;
   options: string[];
+  ifs: string[];
 }
 
 /** Everything the page Check shows for a question; without a kit, the first kit of the book is asked for. */
-export async function getCheckAnswer(asked: Asked, person: CurrentPerson): Promise<CheckPageAnswer> {
+export async function getCheckAnswer(asked: AskedCheck, person: CurrentPerson): Promise<CheckPageAnswer> {
   const book = await getPlanBook();
   const kits = presentKits(book);
   const seesCosts = mayDo(person.roles, "see-costs");
@@ -37,6 +46,7 @@ export async function getCheckAnswer(asked: Asked, person: CurrentPerson): Promi
     quantity: asked.quantity,
     by: asked.by ?? null,
     options: asked.options,
+    ifs: asked.ifs,
   };
   const empty = {
     question,
@@ -48,11 +58,14 @@ export async function getCheckAnswer(asked: Asked, person: CurrentPerson): Promi
     totalParts: 0,
     seesCosts,
     readyByDate: null,
+    ifs: [],
+    without: null,
   };
   if (question.kit === null) return empty;
   if (asked.problem !== undefined) return { ...empty, problem: asked.problem };
-  const planned = tryPlan(book, question);
-  if (typeof planned === "string") return { ...empty, problem: planned };
+  const tried = tryIfs(book, asked.ifs, seesCosts);
+  const planned = tryPlan(tried.book, question);
+  if (typeof planned === "string") return { ...empty, ifs: tried.ifs, problem: planned };
   const answer = presentShipCheck(planned);
   const drawn = { ...answer, ladder: keepDrawnRungs(answer.ladder) };
   const parts = presentParts(book, planned, answer, seesCosts);
@@ -62,8 +75,19 @@ export async function getCheckAnswer(asked: Asked, person: CurrentPerson): Promi
     parts,
     stoppers: worstFirst(planned),
     readyByDate: readyByDate(answer),
-    totalParts: countReached(book.structure, planned.segments[0].part),
+    totalParts: countReached(planned.structure, planned.segments[0].part),
+    ifs: tried.ifs,
+    without: tried.book === book ? null : withoutIfs(book, question, seesCosts),
   };
+}
+
+/** The same question to the book as it is. */
+function withoutIfs(book: PlanBook, question: CheckQuestion, seesCosts: boolean): WithoutIfs | null {
+  const planned = tryPlan(book, question);
+  if (typeof planned === "string") return null;
+  const { demand, ladder } = presentShipCheck(planned);
+  const { buildable, earliest } = demand[0];
+  return { buildable, earliest, cost: seesCosts ? (ladder.at(-1)?.cost ?? null) : null };
 }
 
 function readyByDate({ demand, ladder }: ShipCheck): number | null {
@@ -79,7 +103,7 @@ function mostWanted(book: PlanBook, kits: CheckKit[]): string | null {
   return first?.partNumber ?? null;
 }
 
-function tryPlan(book: PlanBook, question: CheckQuestion): ShipPlan | string {
+function tryPlan(book: Pick<PlanBook, "structure" | "supplies">, question: CheckQuestion): ShipPlan | string {
   const { kit, quantity, by, options } = question;
   const demand = { partNumber: kit ?? "", quantity: String(quantity), due: by, options, serial: null };
   try {
@@ -112,15 +136,16 @@ function presentParts(book: PlanBook, plan: ShipPlan, answer: ShipCheck, seesCos
   for (const { partNumber } of answer.warnings) named.add(partNumber);
   for (const { partNumber } of answer.demand) named.add(partNumber);
   return [...named].map((partNumber) => {
-    const number = book.structure.numberOf.get(partKey(partNumber)) as number;
-    const part = book.parts[number];
+    const number = plan.structure.numberOf.get(partKey(partNumber)) as number;
+    const part = plan.structure.parts[number];
+    const stored = book.parts[book.structure.numberOf.get(partKey(partNumber)) as number];
     return {
       partNumber,
-      description: part.description,
+      description: stored.description,
       sourcing: part.sourcing,
       unit: part.unit,
       decimals: part.decimals,
-      supplier: part.offered,
+      supplier: stored.offered,
       leadTimeDays: part.leadTimeDays,
       hasLaterOrders: plan.served.all.onOrder[number] > plan.served.coming.onOrder[number],
       unitCost: seesCosts ? part.unitCost : null,

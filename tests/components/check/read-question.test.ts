@@ -3,11 +3,17 @@ import { checkSearch } from "~/components/check/check-search";
 import { partNoun, pluralOf } from "~/components/check/part-noun";
 import { readKitCount, readQuestion } from "~/components/check/read-question";
 
-const asked = { kit: "S2", quantity: 10, by: null, options: [] };
+const asked = { kit: "S2", quantity: 10, by: null, options: [], ifs: [] };
 
 describe("the question in the address", () => {
   test("comes back from the address as it went in", () => {
-    const question = { kit: "S 4/7&", quantity: 250, by: "2027-03-14", options: ["A+B", "C"] };
+    const question = {
+      kit: "S 4/7&",
+      quantity: 250,
+      by: "2027-03-14",
+      options: ["A+B", "C"],
+      ifs: ["stock:HB-2041:+2", "hold:A%3AB:"],
+    };
     expect(readQuestion(new URLSearchParams(checkSearch(question)), asked)).toEqual(question);
   });
 

@@ -3,7 +3,7 @@ import { checkQuestionSchema } from "~/schemas/planning/check-answer";
 
 describe("the question in an address", () => {
   test("fills its gaps", () => {
-    expect(checkQuestionSchema.parse({})).toEqual({ quantity: 10, options: [] });
+    expect(checkQuestionSchema.parse({})).toEqual({ quantity: 10, options: [], ifs: [] });
     expect(checkQuestionSchema.parse({ kit: "", quantity: "", by: "", options: "" })).toMatchObject({
       quantity: 10,
     });
@@ -17,6 +17,7 @@ describe("the question in an address", () => {
       quantity: 3,
       by: "2027-03-14",
       options: ["A", "B"],
+      ifs: [],
     });
   });
 

@@ -5,10 +5,13 @@ import { PHANTOM } from "~/domain/planning/structure/structure";
 import type { PlanDemand } from "~/domain/planning/types";
 import { formatSteps } from "~/domain/quantity/format-steps";
 import type { WhyAnswer, WhyDemand, WhyPart, WhyQuery } from "~/schemas/planning/why";
+import type { CurrentPerson } from "~/services/people/current-person";
+import { mayDo } from "~/services/people/permissions";
 import { getPlanBook, type PlanBook } from "~/services/planning/get-plan-book.server";
 import { openOrderDemands } from "~/services/planning/open-order-demands";
 import { planDemand } from "~/services/planning/plan-demand.server";
 import type { TriedBook } from "~/services/planning/try-what-if.server";
+import { tryIfs } from "~/services/planning/what-if/try-ifs.server";
 import { AppError } from "~/utils/errors";
 import { findOutOfReach } from "./find-out-of-reach.server";
 import { presentCover } from "./present-cover";
@@ -19,9 +22,9 @@ import { figureOf, type Pass, presentCauses, presentComponents } from "./present
  * and what sets its date.
  * @throws AppError "not-found" for a part, kit or kit order that is not there; "invalid" for options that do not fit
  */
-export async function getWhy(query: WhyQuery): Promise<WhyAnswer> {
+export async function getWhy(query: WhyQuery, person: CurrentPerson): Promise<WhyAnswer> {
   const book = await getPlanBook();
-  const tried: TriedBook = book;
+  const { book: tried } = tryIfs(book, query.ifs, mayDo(person.roles, "see-costs"));
   const { structure } = tried;
   const part = structure.numberOf.get(partKey(query.part));
   if (part === undefined) throw notThere(`There is no part ${query.part} in the book.`);
@@ -41,6 +44,7 @@ export async function getWhy(query: WhyQuery): Promise<WhyAnswer> {
       quantity: query.quantity,
       by: query.by ?? null,
       options: query.options,
+      ifs: query.ifs,
     },
     through: query.through ?? null,
     kits: query.through ? demand.length : Number(demand[0].quantity),

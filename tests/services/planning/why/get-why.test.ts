@@ -3,7 +3,7 @@ import { whyQuerySchema } from "~/schemas/planning/why";
 import { getWhy } from "~/services/planning/why/get-why.server";
 import { useTestDatabase as testDatabase } from "../../../support/database";
 import { addStepsOf } from "../../../support/planning/add-steps-of";
-import { bring, refusal } from "../../imports/import-support";
+import { bring, manager, refusal } from "../../imports/import-support";
 
 testDatabase();
 
@@ -29,7 +29,7 @@ beforeEach(async () => {
   );
 });
 
-const why = (query: Record<string, unknown>) => getWhy(whyQuerySchema.parse(query));
+const why = (query: Record<string, unknown>) => getWhy(whyQuerySchema.parse(query), manager);
 const all = ["KIT", "DRIVE", "BOX", "BOLT", "TAPE"];
 
 describe("what asks for a part", () => {
