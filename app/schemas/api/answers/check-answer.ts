@@ -8,6 +8,7 @@ export const checkQuestion = z.object({
   quantity: z.int().min(1),
   by: dayText.nullable(),
   options: z.array(z.string()),
+  ifs: z.array(z.string()),
 });
 
 const checkPart = z.object({
@@ -39,4 +40,8 @@ export const checkPageAnswer = z.object({
   totalParts: count,
   seesCosts: z.boolean(),
   readyByDate: count.nullable(),
+  ifs: z.array(z.object({ text: z.string(), problem: z.string().nullable() })),
+  without: z
+    .object({ buildable: count.nullable(), earliest: dayText, cost: decimalText.nullable() })
+    .nullable(),
 }) satisfies z.ZodType<CheckPageAnswer>;

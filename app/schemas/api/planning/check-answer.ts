@@ -1,6 +1,6 @@
 import { checkPageAnswer } from "~/schemas/api/answers/check-answer";
 import type { ApiRoute } from "~/schemas/api/api-route";
-import { checkQuestionSchema } from "~/schemas/planning/check-answer";
+import { checkAddress } from "./with-ifs";
 
 export const checkAnswerRoutes: ApiRoute[] = [
   {
@@ -8,8 +8,17 @@ export const checkAnswerRoutes: ApiRoute[] = [
     method: "get",
     path: "/api/check-answer",
     summary: "What the page Check shows: the answer with the parts and kits it speaks of",
-    query: checkQuestionSchema,
+    query: checkAddress,
     answer: { type: "application/json", schema: checkPageAnswer },
+    problems: [422],
+  },
+  {
+    id: "getCheckCsv",
+    method: "get",
+    path: "/api/check-csv",
+    summary: "The parts that are missing as CSV, worst first",
+    query: checkAddress,
+    answer: { type: "text/csv" },
     problems: [422],
   },
 ];

@@ -1,6 +1,6 @@
 import { whyAnswer } from "~/schemas/api/answers/why";
 import type { ApiRoute } from "~/schemas/api/api-route";
-import { whyQuerySchema } from "~/schemas/planning/why";
+import { whyAddressQuery } from "./with-ifs";
 
 export const whyRoutes: ApiRoute[] = [
   {
@@ -8,7 +8,7 @@ export const whyRoutes: ApiRoute[] = [
     method: "get",
     path: "/api/why",
     summary: "What asks for a part, what covers it and what sets its date",
-    query: whyQuerySchema,
+    query: whyAddressQuery,
     answer: { type: "application/json", schema: whyAnswer },
     problems: [404, 422],
   },
