@@ -30,6 +30,12 @@ export default [
 
   // find
   route("find", "routes/find/search.tsx"),
+  route("find/parts/:partNumber", "routes/find/part.tsx"),
+  route("find/bins/:bin", "routes/find/bin.tsx"),
+  route("find/suppliers/:supplier", "routes/find/supplier.tsx"),
+  route("find/purchase-orders/:number", "routes/find/purchase-order.tsx"),
+  route("find/shop-orders/:number", "routes/find/shop-order.tsx"),
+  route("find/kit-orders/:number", "routes/find/kit-order.tsx"),
   route("find/files", "routes/find/files.tsx"),
 
   // api

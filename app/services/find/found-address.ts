@@ -7,7 +7,7 @@ const FOLDERS: Record<FoundKind, string> = {
   supplier: "/find/suppliers/",
   "purchase-order": "/find/purchase-orders/",
   "shop-order": "/find/shop-orders/",
-  "kit-order": "/pack/kit-orders/",
+  "kit-order": "/find/kit-orders/",
 };
 
 /** The page of a thing. A lot is a place on the page of its part. */

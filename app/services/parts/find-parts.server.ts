@@ -1,7 +1,8 @@
 import { readRows } from "~/db/read-rows.server";
+import type { PresentedPart } from "~/schemas/parts/part-answer";
 import type { CurrentPerson } from "~/services/people/current-person";
 import { mayDo } from "~/services/people/permissions";
-import { PART_COLUMNS, type PartRow, type PresentedPart, presentPart } from "./present-part";
+import { PART_COLUMNS, type PartRow, presentPart } from "./present-part";
 
 interface PartsQuery {
   q: string;

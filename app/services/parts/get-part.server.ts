@@ -1,34 +1,14 @@
 import { readRows } from "~/db/read-rows.server";
 import { partKey } from "~/domain/planning/part-key";
+import type { OpenOrder, PartAnswer, PartBalance } from "~/schemas/parts/part-answer";
 import type { CurrentPerson } from "~/services/people/current-person";
 import { mayDo } from "~/services/people/permissions";
+import { today } from "~/utils/clock";
 import { AppError } from "~/utils/errors";
 import { formatDecimals } from "~/utils/format/format-decimals";
-import { getWhereUsed, type WhereUsedLine } from "./get-where-used.server";
-import { PART_COLUMNS, type PartRow, type PresentedPart, presentPart } from "./present-part";
-
-export interface PartBalance {
-  bin: string;
-  lot: string | null;
-  state: string;
-  quantity: string;
-  expiresOn: string | null;
-}
-
-interface OpenOrder {
-  reference: string;
-  quantity: string;
-  due: string | null;
-  supplier: string | null;
-}
-
-export interface PartAnswer extends PresentedPart {
-  balances: PartBalance[];
-  /** Promised to builds under way. */
-  promised: { reference: string; quantity: string }[];
-  onOrder: OpenOrder[];
-  whereUsed: WhereUsedLine[];
-}
+import { getWhereUsed } from "./get-where-used.server";
+import { PART_COLUMNS, type PartRow, presentPart } from "./present-part";
+import { standingOf, sumPartStock } from "./sum-part-stock";
 
 const BALANCES = `
   SELECT bin.code AS bin, NULLIF(lot.lot_code, '') AS lot, balance.state, balance.quantity, lot.expires_on AS expiresOn
@@ -37,16 +17,16 @@ const BALANCES = `
   ORDER BY bin.walk_order, bin.bin_key, lot.lot_code, balance.state`;
 
 const ON_ORDER = `
-  SELECT purchase_order.number AS reference, line.quantity - line.received AS quantity, line.due_on AS due,
+  SELECT 'purchase-order' AS kind, purchase_order.number AS reference, line.quantity - line.received AS quantity, line.due_on AS due,
     supplier.name AS supplier
   FROM purchase_order_line line
   JOIN purchase_order ON purchase_order.id = line.purchase_order_id
   LEFT JOIN supplier ON supplier.id = purchase_order.supplier_id
   WHERE line.part_id = :id AND purchase_order.state = 'sent' AND line.closed = FALSE AND line.quantity > line.received
   UNION ALL
-  SELECT number, quantity - finished, due_on, NULL FROM shop_order
+  SELECT 'shop-order', number, quantity - finished, due_on, NULL FROM shop_order
   WHERE part_id = :id AND state = 'released' AND quantity > finished
-  ORDER BY due, reference`;
+  ORDER BY due IS NULL, due, reference`;
 
 const PROMISED = `
   SELECT shop_order.number AS reference, component.promised AS quantity
@@ -62,11 +42,22 @@ export async function getPart(partNumber: string, person: CurrentPerson): Promis
     quantity: formatDecimals(one.quantity, row.decimals),
   });
   const named = { id: row.id };
+  const day = today();
+  const balances = (await readRows<Omit<PartBalance, "standing">>(BALANCES, named)).map((balance) => ({
+    ...say(balance),
+    standing: standingOf(balance.state, balance.expiresOn, day),
+  }));
+  const promised = (await readRows<PartAnswer["promised"][number]>(PROMISED, named)).map(say);
+  const onOrder = (await readRows<Omit<OpenOrder, "isOverdue">>(ON_ORDER, named)).map((order) => ({
+    ...say(order),
+    isOverdue: order.due !== null && order.due < day,
+  }));
   return {
     ...presentPart(row, mayDo(person.roles, "see-costs")),
-    balances: (await readRows<PartBalance>(BALANCES, named)).map(say),
-    promised: (await readRows<PartAnswer["promised"][number]>(PROMISED, named)).map(say),
-    onOrder: (await readRows<OpenOrder>(ON_ORDER, named)).map(say),
+    totals: sumPartStock({ balances, promised, onOrder }, row.decimals),
+    balances,
+    promised,
+    onOrder,
     whereUsed: (await getWhereUsed(partNumber)).parents,
   };
 }

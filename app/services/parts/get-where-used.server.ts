@@ -1,46 +1,38 @@
-import type { Structure } from "~/domain/planning/structure/structure";
-import type { PlanLine } from "~/domain/planning/types";
-import { findBookPart } from "./book-part.server";
-
-/** A line that takes the part, with its parent. */
-export interface WhereUsedLine {
-  partNumber: string;
-  description: string;
-  /** For one of the parent; null as required. */
-  quantity: string | null;
-  option: string | null;
-  fromSerial: string | null;
-  toSerial: string | null;
-}
+import { readRows } from "~/db/read-rows.server";
+import { partKey } from "~/domain/planning/part-key";
+import type { WhereUsedLine } from "~/schemas/parts/part-answer";
+import { AppError } from "~/utils/errors";
+import { trimDecimal } from "~/utils/format/trim-decimal";
 
 export interface WhereUsedAnswer {
   partNumber: string;
   parents: WhereUsedLine[];
 }
 
+const PARENTS = `
+  SELECT parent.part_number AS partNumber, parent.description, line.find_number AS findNumber, line.quantity,
+    line.option_code AS \`option\`, line.from_serial AS fromSerial, line.to_serial AS toSerial
+  FROM structure_line line JOIN part parent ON parent.id = line.parent_id
+  WHERE line.component_id = :id
+  ORDER BY parent.part_key, line.position, line.id`;
+
 /** The parents that take the part directly, one entry a line, by part number. */
 export async function getWhereUsed(partNumber: string): Promise<WhereUsedAnswer> {
-  const { book, number } = await findBookPart(partNumber);
-  const parents = linesWithComponent(book.structure, number).map(({ parent, line }) => ({
-    partNumber: book.parts[parent].partNumber,
-    description: book.parts[parent].description,
-    quantity: line.quantity,
-    option: line.option,
-    fromSerial: line.fromSerial,
-    toSerial: line.toSerial,
-  }));
-  parents.sort((a, b) => (a.partNumber < b.partNumber ? -1 : a.partNumber > b.partNumber ? 1 : 0));
-  return { partNumber: book.parts[number].partNumber, parents };
-}
-
-function linesWithComponent(structure: Structure, component: number): { parent: number; line: PlanLine }[] {
-  const found: { parent: number; line: PlanLine }[] = [];
-  for (const group of [structure.fixed, structure.conditional, structure.asRequired]) {
-    for (let parent = 0; parent < component; parent++) {
-      for (let k = group.starts[parent]; k < group.starts[parent + 1]; k++) {
-        if (group.component[k] === component) found.push({ parent, line: structure.lines[group.source[k]] });
-      }
-    }
-  }
-  return found;
+  const [part] = await readRows<{ id: number; partNumber: string }>(
+    "SELECT id, part_number AS partNumber FROM part WHERE part_key = :key",
+    { key: partKey(partNumber) },
+  );
+  if (!part)
+    throw new AppError(
+      "not-found",
+      `There is no part ${partNumber} in the book. Check the number or search for it.`,
+    );
+  const parents = await readRows<WhereUsedLine>(PARENTS, { id: part.id });
+  return {
+    partNumber: part.partNumber,
+    parents: parents.map((line) => ({
+      ...line,
+      quantity: line.quantity === null ? null : trimDecimal(line.quantity),
+    })),
+  };
 }

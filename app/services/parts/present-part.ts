@@ -1,4 +1,5 @@
-import type { DecimalString, Sourcing } from "~/domain/planning/types";
+import type { DecimalString } from "~/domain/planning/types";
+import type { PresentedPart } from "~/schemas/parts/part-answer";
 import { formatDecimals } from "~/utils/format/format-decimals";
 import { trimDecimal } from "~/utils/format/trim-decimal";
 
@@ -8,29 +9,9 @@ export const PART_COLUMNS = `part.id, part.part_number AS partNumber, part.descr
   part.lot_minimum AS lotMinimum, part.lot_multiple AS lotMultiple, part.lot_maximum AS lotMaximum,
   part.lot_days AS lotDays, part.yield, part.unit_cost AS unitCost, part.mass_kg AS massKg, part.sold`;
 
-export interface PartRow {
+export interface PartRow extends Omit<PresentedPart, "sold"> {
   id: number;
-  partNumber: string;
-  description: string;
-  sourcing: Sourcing;
-  unit: string;
-  decimals: number;
-  leadTimeDays: number;
-  safetyStock: DecimalString;
-  lotRule: string;
-  lotMinimum: DecimalString | null;
-  lotMultiple: DecimalString | null;
-  lotMaximum: DecimalString | null;
-  lotDays: number | null;
-  yield: DecimalString;
-  unitCost: DecimalString | null;
-  massKg: DecimalString | null;
   sold: number;
-}
-
-/** A part as JSON routes give it: quantities with the part's decimals, cost null where it may not be seen. */
-export interface PresentedPart extends Omit<PartRow, "id" | "sold"> {
-  sold: boolean;
 }
 
 export function presentPart({ id: _, ...row }: PartRow, seesCosts: boolean): PresentedPart {
