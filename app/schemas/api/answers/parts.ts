@@ -25,6 +25,7 @@ export const partsAnswer = z.object({ page: count, size: count, total: count, pa
 const whereUsedLine = z.object({
   partNumber: z.string(),
   description: z.string(),
+  findNumber: z.string().nullable(),
   quantity: decimalText.nullable(),
   option: z.string().nullable(),
   fromSerial: z.string().nullable(),
@@ -39,16 +40,32 @@ const balance = z.object({
   state: z.string(),
   quantity: decimalText,
   expiresOn: dayText.nullable(),
+  standing: z.enum(["usable", "held", "expired", "staged", "with-supplier"]),
 });
 
 const openOrder = z.object({
+  kind: z.enum(["purchase-order", "shop-order"]),
   reference: z.string(),
   quantity: decimalText,
   due: dayText.nullable(),
   supplier: z.string().nullable(),
+  isOverdue: z.boolean(),
+});
+
+const totals = z.object({
+  onHand: decimalText,
+  usable: decimalText,
+  held: decimalText,
+  expired: decimalText,
+  staged: decimalText,
+  withSupplier: decimalText,
+  promised: decimalText,
+  available: decimalText,
+  onOrder: decimalText,
 });
 
 export const partAnswer = part.extend({
+  totals,
   balances: z.array(balance),
   promised: z.array(z.object({ reference: z.string(), quantity: decimalText })),
   onOrder: z.array(openOrder),
