@@ -39,7 +39,7 @@ function Changes({ before, after }: { before: string | null; after: string | nul
   const lines = changeLines(before, after);
   if (lines.length === 0) return <p className="text-soft">nothing was written down beside it</p>;
   return (
-    <ul className="grid content-start gap-1">
+    <ul className="flex flex-wrap content-start gap-x-6 gap-y-1">
       {lines.map((line) => (
         <li key={line.name} className="[overflow-wrap:anywhere]">
           <span className="text-soft">{line.name}:</span>{" "}

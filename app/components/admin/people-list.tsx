@@ -49,7 +49,7 @@ function PersonRow({ person }: { person: PersonFacts }) {
         {seenAt ? (
           <span className="figure">{formatMoment(seenAt)}</span>
         ) : (
-          <span className="text-soft">no session</span>
+          <span className="text-soft">not yet</span>
         )}
       </td>
     </tr>

@@ -27,7 +27,7 @@ export function RoleBoxes({ chosen, error }: RoleBoxesProps) {
               name="roles"
               value={role}
               defaultChecked={chosen.includes(role)}
-              className="size-5 shrink-0"
+              className="size-6 shrink-0"
             />
             <span className="leading-snug">
               {ROLE_NAMES[role]}

@@ -35,7 +35,7 @@ export function NameMenu({ person }: NameMenuProps) {
         <p className="font-bold">{person.name}</p>
         <p className="text-soft">{person.roles.join(", ")}</p>
         {places.length > 0 && (
-          <ul className="mt-3 border-line border-y py-1">
+          <ul className="mt-3 border-line border-t pt-1">
             {places.map(({ word, to }) => (
               <li key={to}>
                 <Link to={to} className="flex min-h-11 items-center underline">

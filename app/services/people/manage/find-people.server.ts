@@ -11,7 +11,7 @@ export interface ListedPerson {
   email: string;
   roles: Role[];
   state: PersonState;
-  /** When a session of theirs was last used, ISO; null where there is none. */
+  /** When a session of theirs was last used or the last act of theirs was done, ISO; null for neither. */
   seenAt: string | null;
 }
 
@@ -22,6 +22,7 @@ interface Row {
   roles: string | null;
   state: PersonState;
   seenAt: Date | null;
+  actedAt: Date | null;
 }
 
 /** Everybody by name, those who are kept out last; or the one with this number. */
@@ -31,16 +32,22 @@ export async function findPeople(id: number | null = null): Promise<ListedPerson
             (SELECT GROUP_CONCAT(role ORDER BY role) FROM person_role WHERE person_id = person.id) AS roles,
             CASE WHEN person.disabled_at IS NOT NULL THEN 'disabled'
                  WHEN person.password_hash = :none THEN 'invited' ELSE 'in' END AS state,
-            (SELECT MAX(seen_at) FROM session WHERE person_id = person.id) AS seenAt
+            (SELECT MAX(seen_at) FROM session WHERE person_id = person.id) AS seenAt,
+            (SELECT at FROM audit_event WHERE actor_id = person.id ORDER BY id DESC LIMIT 1) AS actedAt
        FROM person
       WHERE :id IS NULL OR person.id = :id
       ORDER BY person.disabled_at IS NOT NULL, person.name, person.id`,
     { none: NO_PASSWORD, id },
   );
-  return rows.map(({ id, roles, seenAt, ...row }) => ({
+  return rows.map(({ id, roles, seenAt, actedAt, ...row }) => ({
     ...row,
     id: Number(id),
     roles: (roles?.split(",") ?? []) as Role[],
-    seenAt: seenAt && new Date(seenAt).toISOString(),
+    seenAt: latest(seenAt, actedAt),
   }));
+}
+
+function latest(...moments: (Date | null)[]): string | null {
+  const times = moments.flatMap((moment) => (moment === null ? [] : [new Date(moment).getTime()]));
+  return times.length === 0 ? null : new Date(Math.max(...times)).toISOString();
 }
