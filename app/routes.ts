@@ -10,6 +10,9 @@ export default [
   route("forgotten", "routes/auth/forgotten.tsx"),
   route("new-password/:token", "routes/auth/new-password.tsx"),
 
+  // account
+  route("account", "routes/auth/account.tsx"),
+
   // admin
   route("admin/people", "routes/admin/people.tsx"),
   route("admin/people/:id", "routes/admin/person.tsx"),

@@ -7,8 +7,9 @@ export interface NameMenuProps {
   person: { name: string; roles: readonly string[]; may: readonly string[] };
 }
 
-/** What the manager keeps; each stands here for those who may do its act. */
-const MANAGING = [
+/** Pages behind the name; each stands here for those who may do its act. */
+const PLACES = [
+  { act: "own-account", word: "Your account", to: "/account" },
   { act: "people", word: "People", to: "/admin/people" },
   { act: "settings", word: "Mail", to: "/admin/mail" },
   { act: "audit", word: "Audit", to: "/admin/audit" },
@@ -18,7 +19,7 @@ const MANAGING = [
 export function NameMenu({ person }: NameMenuProps) {
   const menu = useRef<HTMLDetailsElement>(null);
   useCloseDetails(menu);
-  const places = MANAGING.filter(({ act }) => person.may.includes(act));
+  const places = PLACES.filter(({ act }) => person.may.includes(act));
   const [firstName] = person.name.split(" ");
   return (
     <details ref={menu} className="group relative shrink-0">
