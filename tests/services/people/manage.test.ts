@@ -18,7 +18,7 @@ import { useTestDatabase } from "../../support/database";
 import { asActor } from "../../support/people/as-actor";
 import { insertPerson } from "../../support/people/insert-person";
 
-useTestDatabase();
+const database = useTestDatabase();
 
 let greta: number;
 let wren: number;
@@ -100,13 +100,16 @@ describe("the last manager", () => {
     await expect(disablePerson(greta, asActor(greta))).rejects.toMatchObject(LAST);
   });
 
-  it("is left when two managers shut each other out at the same time", async () => {
+  it("is left when both managers are kept out at the same time", async () => {
     const other = await insertPerson(["manager"], { name: "Odd", email: "odd@saltmarsh.example" });
-    const ends = await Promise.allSettled([
-      disablePerson(greta, asActor(other)),
-      changeRoles(other, { roles: ["clerk"] }, asActor(greta)),
-    ]);
-    expect(ends.map(({ status }) => status).sort()).toEqual(["fulfilled", "rejected"]);
+    for (let round = 0; round < 10; round++) {
+      const ends = await Promise.allSettled([
+        disablePerson(greta, asActor(wren)),
+        disablePerson(other, asActor(wren)),
+      ]);
+      expect(ends.map(({ status }) => status).sort()).toEqual(["fulfilled", "rejected"]);
+      await database.query("UPDATE person SET disabled_at = NULL");
+    }
   });
 });
 
