@@ -6,6 +6,7 @@ import {
   Outlet,
   Scripts,
   ScrollRestoration,
+  useMatches,
   useRouteLoaderData,
 } from "react-router";
 import type { Route } from "./+types/root";
@@ -57,8 +58,14 @@ export function Layout({ children }: { children: ReactNode }) {
   );
 }
 
+/** A page with `handle = { standsAlone: true }` has its own frame, also for people who have signed in. */
+function standsAlone(handle: unknown): boolean {
+  return (handle as { standsAlone?: boolean } | undefined)?.standsAlone === true;
+}
+
 export default function Root({ loaderData }: Route.ComponentProps) {
-  if (!loaderData.person) return <Outlet />;
+  const isAlone = useMatches().some(({ handle }) => standsAlone(handle));
+  if (!loaderData.person || isAlone) return <Outlet />;
   return (
     <Shell person={loaderData.person}>
       <Outlet />

@@ -93,6 +93,9 @@ describe("an invitation", () => {
     expect(sent.headers.get("Location")).toBe("/admin/people?done=invited");
     const link = await newestLink();
     expect(await (await ask(link)).text()).toContain("Welcome, Bryn Hale");
+    const followed = await (await ask(link, { headers: manager })).text();
+    expect(followed).toContain("Welcome, Bryn Hale");
+    expect(followed.match(/<main/g)).toHaveLength(1);
     const short = await ask(
       link,
       form([

@@ -9,6 +9,9 @@ import { DoorField } from "./door-field";
 import { DoorNotice } from "./door-notice";
 import { formFault } from "./form-fault";
 
+/** Somebody who has signed in may follow a link as well. */
+export const handle = { standsAlone: true };
+
 export const meta: Route.MetaFunction = () => [{ title: "Forgotten your password? · Cotterpin" }];
 
 export const headers: Route.HeadersFunction = ({ actionHeaders }) => actionHeaders;

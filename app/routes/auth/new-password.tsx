@@ -12,6 +12,9 @@ import { DoorNotice } from "./door-notice";
 import { formFault } from "./form-fault";
 import { GoneLink } from "./gone-link";
 
+/** Somebody who has signed in may follow a link as well. */
+export const handle = { standsAlone: true };
+
 export const meta: Route.MetaFunction = () => [
   { title: "A new password · Cotterpin" },
   { name: "referrer", content: "no-referrer" },
