@@ -18,7 +18,10 @@ export default defineConfig({
                   name: "base",
                   test: /node_modules[\\/](react|react-dom|react-router|scheduler|@tanstack|turbo-stream|cookie)[\\/]/,
                 },
-                { name: "shell", test: /app[\\/](utils[\\/]format|components[\\/]layout|hooks[\\/]use-close)/ },
+                {
+                  name: "shell",
+                  test: /app[\\/](utils[\\/]format|components[\\/]layout|hooks[\\/]use-close)/,
+                },
               ],
             },
           },
