@@ -1,5 +1,8 @@
 import { QueryClient, QueryClientProvider } from "@tanstack/react-query";
 import { type ReactNode, useState } from "react";
+import { FindBox } from "~/components/find/box/find-box";
+import { FindIconLink } from "~/components/find/box/find-icon-link";
+import { ScannerEar } from "~/components/find/box/scanner-ear";
 import { CotterPin } from "./cotter-pin";
 import { NameMenu, type NameMenuProps } from "./name-menu";
 import { ShipLine } from "./ship-line";
@@ -28,6 +31,8 @@ export function Shell({ person, children }: ShellProps) {
             <span className="sr-only sm:not-sr-only">Cotterpin</span>
           </span>
           <VerbBar />
+          <FindBox />
+          <FindIconLink />
           <NameMenu person={person} />
         </header>
         <main
@@ -39,6 +44,7 @@ export function Shell({ person, children }: ShellProps) {
         </main>
         <ShipLine />
       </div>
+      <ScannerEar />
     </QueryClientProvider>
   );
 }

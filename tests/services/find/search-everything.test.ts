@@ -82,6 +82,21 @@ describe("searching everything", () => {
     ]);
   });
 
+  it("reads a scanned label where nothing is called so", async () => {
+    expect((await searchEverything("PHB-2041")).exact).toBe("/find/parts/HB-2041");
+    expect((await searchEverything("1TL-77")).exact).toBe("/find/parts/HB-2041#lot-L-77");
+    expect((await searchEverything("LA1")).exact).toBe("/find/bins/A1");
+    expect((await searchEverything("KPO-26-0901")).exact).toBe("/find/purchase-orders/PO-26-0901");
+    expect((await searchEverything("S029")).exact).toBe("/find/kit-orders/KO-0147");
+    const label = "[)>\u001e06\u001dPHB-2041\u001d1TL-77\u001dQ4\u001e\u0004";
+    expect((await searchEverything(label)).exact).toBe("/find/parts/HB-2041#lot-L-77");
+    const unknownLot = await searchEverything("[)>\u001e06\u001dPHB-2041\u001d1TL-78\u001e\u0004");
+    expect(unknownLot.exact).toBe("/find/parts/HB-2041");
+    expect(unknownLot.groups[0].found[0].name).toBe("HB-2041");
+    await bring("parts", "part_number,sourcing\nPHB-2041,buy\n");
+    expect((await searchEverything("PHB-2041")).exact).toBe("/find/parts/PHB-2041");
+  });
+
   it("shows so many of a kind and counts the others", async () => {
     const { groups } = await searchEverything("b", 2);
     const [parts] = groups;
