@@ -1,5 +1,6 @@
 import { beforeEach, describe, expect, it } from "vitest";
 import { OutboxMail } from "~/db/models/system/outbox-mail";
+import { changePassword } from "~/services/people/account/change-password.server";
 import { checkCredentials } from "~/services/people/check-credentials.server";
 import { findAsker } from "~/services/people/find-asker.server";
 import { acceptInvitation } from "~/services/people/links/accept-invitation.server";
@@ -158,6 +159,16 @@ describe("a forgotten password", () => {
     expect(Number(minutes)).toBeLessThanOrEqual(60);
     await database.query("UPDATE person_link SET expires_at = NOW(3) - INTERVAL 1 SECOND");
     await expect(setNewPassword(second, { password: NEW })).rejects.toMatchObject(GONE);
+  });
+
+  it("needs no link any more once the person has changed the password", async () => {
+    const id = await insertPerson(["clerk"], { name: "Bryn Hale", email });
+    await ask();
+    const secret = await newestSecret();
+    const sessionId = await startSession(id, null);
+    const fields = { present: PASSWORD, password: NEW };
+    await changePassword(fields, asActor(id, ["clerk"]), { sessionId, address: "10.0.0.3" });
+    await expect(setNewPassword(secret, { password: PASSWORD })).rejects.toMatchObject(GONE);
   });
 
   it("takes a link for its own kind only", async () => {

@@ -7,6 +7,7 @@ import { appendAuditEvent } from "~/services/audit/append-audit-event.server";
 import { parseInput } from "~/utils/request-body";
 import type { CurrentPerson } from "../current-person";
 import { hashPassword } from "../hash-password.server";
+import { withdrawLinks } from "../links/make-link.server";
 import { hashSecret } from "../secret.server";
 import { assertPresentPassword } from "./assert-present-password.server";
 import { ownId } from "./own-id";
@@ -18,7 +19,7 @@ interface Here {
 }
 
 /**
- * Changes one's own password and ends every other session.
+ * Changes one's own password, ends every other session, and withdraws what was sent for a forgotten one.
  * @param input the form's fields: present, password
  * @returns how many sessions ended
  * @throws AppError `invalid` with errors by field, `too-many`
@@ -32,6 +33,7 @@ export async function changePassword(input: unknown, person: CurrentPerson, here
     await Person.update({ passwordHash }, { where: { id }, transaction });
     const others = { personId: id, idHash: { [Op.ne]: hashSecret(here.sessionId) } };
     const sessionsEnded = await Session.destroy({ where: others, transaction });
+    await withdrawLinks(id, transaction);
     const after = { password: "changed", sessionsEnded };
     await appendAuditEvent({ actorId: id, act: "own-account", subject: `person ${id}`, after }, transaction);
     return sessionsEnded;
