@@ -39,6 +39,7 @@ export default [
   route("find/purchase-orders/:number", "routes/find/purchase-order.tsx"),
   route("find/shop-orders/:number", "routes/find/shop-order.tsx"),
   route("find/kit-orders/:number", "routes/find/kit-order.tsx"),
+  route("find/parts/:partNumber/structure", "routes/find/structure.tsx"),
   route("find/files", "routes/find/files.tsx"),
 
   // api

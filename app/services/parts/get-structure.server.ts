@@ -1,8 +1,8 @@
-import type { Structure } from "~/domain/planning/structure/structure";
 import type { Sourcing } from "~/domain/planning/types";
 import type { PlanBook } from "~/services/planning/get-plan-book.server";
 import { AppError } from "~/utils/errors";
 import { findBookPart } from "./book-part.server";
+import { linesOf } from "./lines-of";
 
 /** Nodes of one answer at most: a tree repeats a part wherever it stands, and some trees have no end to speak of. */
 const MOST_NODES = 20_000;
@@ -50,20 +50,6 @@ function tooLarge(partNumber: string): AppError {
     "invalid",
     `The structure of ${partNumber} has more than ${most} places. Ask for fewer levels.`,
   );
-}
-
-/** A part's lines as they were given, whatever their kind. */
-function linesOf(structure: Structure, part: number): { component: number; line: number }[] {
-  const lines: { component: number; line: number }[] = [];
-  for (const { starts, component, source } of [
-    structure.fixed,
-    structure.conditional,
-    structure.asRequired,
-  ]) {
-    for (let k = starts[part]; k < starts[part + 1]; k++)
-      lines.push({ component: component[k], line: source[k] });
-  }
-  return lines.sort((a, b) => a.line - b.line);
 }
 
 function nodeOf(book: PlanBook, part: number, lineIndex: number | null): StructureNode {
