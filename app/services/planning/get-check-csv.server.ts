@@ -7,6 +7,9 @@ import { type AskedCheck, getCheckAnswer } from "./get-check-answer.server";
 
 interface Row {
   kits: string;
+  /** The changes that were tried, and those that could not be, as the address holds them. */
+  whatIf: string;
+  notTried: string;
   shortage: Shortage;
   part: CheckPart | undefined;
 }
@@ -26,6 +29,8 @@ const COLUMNS: CsvColumn<Row>[] = [
   { name: "need_by", cell: (row) => row.shortage.needBy },
   { name: "order_by", cell: (row) => row.shortage.orderBy },
   { name: "ready_on", cell: (row) => row.shortage.readyOn },
+  { name: "what_if", cell: (row) => row.whatIf },
+  { name: "not_tried", cell: (row) => row.notTried },
 ];
 
 const COSTS: CsvColumn<Row>[] = [
@@ -35,17 +40,21 @@ const COSTS: CsvColumn<Row>[] = [
 
 /**
  * The answer of Check as CSV: the parts that are missing, worst first, with their figures; costs for people who may
- * see them. @throws AppError "invalid" where there is no answer
+ * see them. Each row names the changes that were tried and those that could not be. @throws AppError "invalid" where there is no answer
  */
 export async function getCheckCsv(asked: AskedCheck, person: CurrentPerson): Promise<string> {
-  const { answer, parts, stoppers, seesCosts, problem } = await getCheckAnswer(asked, person);
+  const { answer, parts, stoppers, ifs, seesCosts, problem } = await getCheckAnswer(asked, person);
   if (answer === null) throw new AppError("invalid", problem ?? "There is no kit in the book yet.");
   const { partNumber, quantity } = answer.demand[0];
   const known = new Map(parts.map((part) => [part.partNumber, part]));
   const place = new Map(stoppers.map((part, at) => [part, at]));
+  const whatIf = ifs.filter((tried) => tried.problem === null).map(({ text }) => text);
+  const notTried = ifs.filter((tried) => tried.problem !== null).map(({ text }) => text);
   const rows = answer.shortages
     .map((shortage) => ({
       kits: `${quantity} ${partNumber}`,
+      whatIf: whatIf.join(" "),
+      notTried: notTried.join(" "),
       shortage,
       part: known.get(shortage.partNumber),
     }))

@@ -101,3 +101,10 @@ test("as a file the parts that are missing stand with their figures, harmless in
   expect(lines[1]).toContain("5 KIT,BOLT,'=Bolt,,EA,30,20,10,0,10,4,");
   expect(await getCheckCsv(asked, { ...manager, roles: ["clerk"] })).not.toContain("cost");
 });
+
+test("the file names what was tried and what could not be", async () => {
+  const asked = checkQuestionSchema.parse({ kit: "KIT", quantity: 5, ifs: ["stock:BOLT:-3", "=nonsense"] });
+  const [header, row] = (await getCheckCsv(asked, { ...manager, roles: ["clerk"] })).split("\r\n");
+  expect(header).toMatch(/,what_if,not_tried$/);
+  expect(row).toMatch(/,stock:BOLT:-3,'=nonsense$/);
+});
