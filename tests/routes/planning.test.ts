@@ -292,3 +292,15 @@ describe("GET /api/why", () => {
     expect((await ask("/api/why?kit=KIT&part=BOLT&kits=0")).status).toBe(422);
   });
 });
+
+describe("GET /api/check-csv", () => {
+  it("sends the parts that are missing as a file, with what was tried", async () => {
+    const headers = { Authorization: `Bearer ${await createToken({ role: "planner", name: "csv" })}` };
+    const address = "/api/check-csv?kit=KIT&quantity=5&options=NIGHT&if=stock:BOLT:-3";
+    const response = await application(address, { headers });
+    expect(response.headers.get("Content-Type")).toBe("text/csv; charset=utf-8");
+    expect(await response.text()).toMatch(/BOLT.*LAMP|LAMP[\s\S]*BOLT|BOLT[\s\S]*LAMP/);
+    expect((await application(address)).status).toBe(401);
+    expect((await application("/api/check-csv?kit=NONE", { headers })).status).toBe(422);
+  });
+});

@@ -1,6 +1,7 @@
 import { Outlet, type ShouldRevalidateFunctionArgs } from "react-router";
 import { CheckPage } from "~/components/check/check-page";
 import { checkQuestionSchema } from "~/schemas/planning/check-answer";
+import { readCheckQuery } from "~/schemas/planning/read-check-query";
 import { guardedLoader } from "~/services/people/guard.server";
 import { getCheckAnswer } from "~/services/planning/get-check-answer.server";
 import type { Route } from "./+types/check";
@@ -9,13 +10,12 @@ export const meta: Route.MetaFunction = () => [{ title: "Check · Cotterpin" }];
 
 /** Where the address asks what cannot be, the page says so and keeps the rest of the question. */
 export const loader = guardedLoader("look", ({ url }: Route.LoaderArgs, person) => {
-  const search = Object.fromEntries(url.searchParams);
-  const options = url.searchParams.getAll("options").join(",");
-  const asked = checkQuestionSchema.safeParse({ ...search, options, ifs: url.searchParams.getAll("if") });
+  const search = readCheckQuery(url.searchParams);
+  const asked = checkQuestionSchema.safeParse(search);
   if (asked.success) return getCheckAnswer(asked.data, person);
   const wrong = new Set(asked.error.issues.map((issue) => issue.path[0]));
   const rest = Object.fromEntries(Object.entries(search).filter(([name]) => !wrong.has(name)));
-  const kept = checkQuestionSchema.parse({ ...rest, options: wrong.has("options") ? "" : options });
+  const kept = checkQuestionSchema.parse(rest);
   return getCheckAnswer({ ...kept, problem: asked.error.issues[0].message }, person);
 });
 

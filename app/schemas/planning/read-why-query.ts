@@ -1,9 +1,6 @@
-/** The parts of an address that a why is asked by, for its schema: `via` and `options` may be repeated. */
+import { readCheckQuery } from "./read-check-query";
+
+/** The parts of an address that a why is asked by, for its schema: `via` may be repeated. */
 export function readWhyQuery(search: URLSearchParams): Record<string, unknown> {
-  return {
-    ...Object.fromEntries(search),
-    options: search.getAll("options").join(","),
-    via: search.getAll("via"),
-    ifs: search.getAll("if"),
-  };
+  return { ...readCheckQuery(search), via: search.getAll("via") };
 }
