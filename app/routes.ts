@@ -4,6 +4,7 @@ import { index, type RouteConfig, route } from "@react-router/dev/routes";
 export default [
   index("routes/auth/landing.ts"),
   route("sign-in", "routes/auth/sign-in.tsx"),
+  route("sign-in/code", "routes/auth/sign-in-code.tsx"),
   route("sign-out", "routes/auth/sign-out.ts"),
   route("set-up", "routes/auth/set-up.tsx"),
   route("welcome/:token", "routes/auth/welcome.tsx"),

@@ -2,6 +2,9 @@ import "~/db/associations.server";
 import { describe, expect, it } from "vitest";
 import { sequelize } from "~/db/client.server";
 import { KitOption } from "~/db/models/parts/kit-option";
+import { HalfSignIn } from "~/db/models/people/half-sign-in";
+import { RecoveryCode } from "~/db/models/people/recovery-code";
+import { SecondFactor } from "~/db/models/people/second-factor";
 import { SetupCode } from "~/db/models/people/setup-code";
 import { SignInAttempt } from "~/db/models/people/sign-in-attempt";
 import { AuditEvent } from "~/db/models/system/audit-event";
@@ -21,6 +24,9 @@ const alone = [
   OutboxMail,
   Revision,
   Setting,
+  HalfSignIn,
+  RecoveryCode,
+  SecondFactor,
   SetupCode,
   SignInAttempt,
 ];

@@ -46,6 +46,7 @@ describe("every route", async () => {
       "routes/auth/new-password",
       "routes/auth/set-up",
       "routes/auth/sign-in",
+      "routes/auth/sign-in-code",
       "routes/auth/sign-out",
       "routes/auth/welcome",
       "routes/not-found",
@@ -98,7 +99,7 @@ describe("signing in", () => {
     );
     expect(cookieOf(answer)).not.toBe(planted);
     const start_ = await ask("/", { headers: { Cookie: cookieOf(answer) } });
-    expect([start_.status, start_.headers.get("Location")]).toEqual([302, "/check"]);
+    expect([start_.status, start_.headers.get("Location")]).toEqual([302, "/account"]);
     const again = await ask("/sign-in", { headers: { Cookie: cookieOf(answer) } });
     expect(again.headers.get("Location")).toBe("/");
   });
@@ -180,11 +181,36 @@ describe("signing out", () => {
     const ask = await start();
     const Cookie = cookieOf(await ask("/sign-in", form({ email, password })));
     expect((await ask("/sign-out", { headers: { Cookie } })).headers.get("Location")).toBe("/");
-    expect((await ask("/", { headers: { Cookie } })).headers.get("Location")).toBe("/check");
+    expect((await ask("/", { headers: { Cookie } })).headers.get("Location")).toBe("/account");
     const out = await ask("/sign-out", form({}, { Cookie }));
     expect([out.status, out.headers.get("Location")]).toEqual([302, "/sign-in"]);
     expect(out.headers.get("Set-Cookie")).toContain("Max-Age=0");
     expect((await ask("/", { headers: { Cookie } })).headers.get("Location")).toBe("/sign-in");
+  });
+});
+
+describe("a manager without a second factor", () => {
+  it("comes to their account and nowhere else, except in the demo", async () => {
+    await insertPerson(["manager"], { name: "Greta Lindqvist", email });
+    const ask = await start();
+    const Cookie = cookieOf(await ask("/sign-in", form({ email, password })));
+    const go = (path: string) => ask(path, { headers: { Cookie } });
+    for (const path of ["/", "/check", "/admin/people"])
+      expect((await go(path)).headers.get("Location")).toBe("/account");
+    expect((await go("/api/parts")).status).toBe(403);
+    const page = await go("/account");
+    expect([page.status, await page.text()]).toEqual([
+      200,
+      expect.stringContaining("set up a second factor"),
+    ]);
+    const token = await ask(
+      "/account",
+      form({ intent: "make-token", name: "x", role: "manager" }, { Cookie }),
+    );
+    expect(token.status).toBe(409);
+    await database.query("INSERT INTO setting (name, value) VALUES ('demo', 'true')");
+    expect((await go("/")).headers.get("Location")).toBe("/check");
+    expect((await go("/api/parts")).status).toBe(200);
   });
 });
 
@@ -199,7 +225,9 @@ describe("the first visitor", () => {
     expect(await wrong.text()).toContain("This is not the code");
     const done = await ask("/set-up", form(fields));
     expect([done.status, done.headers.get("Location")]).toEqual([302, "/"]);
-    expect((await ask("/", { headers: { Cookie: cookieOf(done) } })).headers.get("Location")).toBe("/check");
+    expect((await ask("/", { headers: { Cookie: cookieOf(done) } })).headers.get("Location")).toBe(
+      "/account",
+    );
     expect((await ask("/set-up")).headers.get("Location")).toBe("/");
     const late = await ask("/set-up", form({ ...fields, email: "late@y.example" }));
     expect(late.headers.has("Set-Cookie")).toBe(false);

@@ -6,10 +6,11 @@ interface PlaceFormProps {
   state: PersonFacts["state"];
   /** ISO; null where no invitation works. */
   invitedUntil: string | null;
+  hasSecondFactor: boolean;
 }
 
 /** Keeping a person out, letting them in again, inviting them once more. */
-export function PlaceForm({ state, invitedUntil }: PlaceFormProps) {
+export function PlaceForm({ state, invitedUntil, hasSecondFactor }: PlaceFormProps) {
   return (
     <Form method="post" className="sheet grid gap-4" aria-label="Place of this person">
       <h2 className="text-lg">Place</h2>
@@ -48,6 +49,16 @@ export function PlaceForm({ state, invitedUntil }: PlaceFormProps) {
           <div>
             <button type="submit" name="intent" value="disable" className="button">
               Keep this person out
+            </button>
+          </div>
+        </>
+      )}
+      {hasSecondFactor && (
+        <>
+          <p className="text-soft">For somebody who has lost their authenticator and recovery codes.</p>
+          <div>
+            <button type="submit" name="intent" value="reset-factor" className="button">
+              Take the second factor away
             </button>
           </div>
         </>

@@ -2,7 +2,14 @@ import { Form } from "react-router";
 import { formatMoment } from "~/utils/format/format-moment";
 
 interface SessionListProps {
-  sessions: { key: string; createdAt: string; seenAt: string; isThis?: boolean }[];
+  sessions: {
+    key: string;
+    browser: string | null;
+    address: string | null;
+    createdAt: string;
+    seenAt: string;
+    isThis?: boolean;
+  }[];
   /** With a button that ends all but the one that looks. */
   endOthers?: boolean;
 }
@@ -14,7 +21,7 @@ export function SessionList({ sessions, endOthers = false }: SessionListProps) {
       <h2 className="text-lg">Sessions</h2>
       {sessions.length === 0 && <p className="mt-2 text-soft">Not signed in anywhere just now.</p>}
       <ul>
-        {sessions.map(({ key, createdAt, seenAt, isThis }) => (
+        {sessions.map(({ key, browser, address, createdAt, seenAt, isThis }) => (
           <li
             key={key}
             className="flex flex-wrap items-center justify-between gap-x-6 gap-y-2 border-line border-b py-3 last:border-b-0"
@@ -22,7 +29,8 @@ export function SessionList({ sessions, endOthers = false }: SessionListProps) {
             <p>
               Last seen <span className="figure">{formatMoment(seenAt)}</span>
               <span className="block text-[0.9375rem] text-soft">
-                began <span className="figure">{formatMoment(createdAt)}</span>
+                {[browser, address !== "here" && address].filter(Boolean).join(", from ")} began{" "}
+                <span className="figure">{formatMoment(createdAt)}</span>
               </span>
             </p>
             {isThis ? (

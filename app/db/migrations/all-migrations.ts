@@ -2,6 +2,7 @@ import { createOrders } from "./create-orders";
 import { createParts } from "./create-parts";
 import { createPeople } from "./create-people";
 import { createPersonLinks } from "./create-person-links";
+import { createSecondFactors } from "./create-second-factors";
 import { createStock } from "./create-stock";
 import { createSystem } from "./create-system";
 import type { Migration } from "./migration";
@@ -16,4 +17,5 @@ export const ALL_MIGRATIONS: readonly Migration[] = [
   createOrders,
   refuseChangedFacts,
   createPersonLinks,
+  createSecondFactors,
 ];

@@ -23,6 +23,8 @@ const DONE: Record<string, string> = {
   disable: "This person is kept out: their sessions and tokens have ended.",
   enable: "This person may sign in again.",
   "invite-again": "Another invitation is in the outbox; the one before does not work any more.",
+  "reset-factor":
+    "The second factor is taken away and their sessions have ended: the password alone lets them in.",
   "end-session": "The session has ended.",
   "end-token": "The token has ended.",
 };
@@ -43,7 +45,7 @@ export const action = guardedAction("people", async ({ request, params }: Route.
 });
 
 export default function Person({ loaderData, actionData }: Route.ComponentProps) {
-  const { person, sessions, tokens, invitedUntil, done } = loaderData;
+  const { person, sessions, tokens, invitedUntil, hasSecondFactor, done } = loaderData;
   const said = done === null ? undefined : DONE[done];
   return (
     <>
@@ -69,7 +71,7 @@ export default function Person({ loaderData, actionData }: Route.ComponentProps)
             </button>
           </div>
         </Form>
-        <PlaceForm state={person.state} invitedUntil={invitedUntil} />
+        <PlaceForm state={person.state} invitedUntil={invitedUntil} hasSecondFactor={hasSecondFactor} />
         <SessionList sessions={sessions} />
         <TokenList title="Tokens" tokens={tokens} empty="None." />
       </div>

@@ -5,6 +5,7 @@ import { enablePerson } from "~/services/people/manage/enable-person.server";
 import { endTheirSession } from "~/services/people/manage/end-their-session.server";
 import { endTheirToken } from "~/services/people/manage/end-their-token.server";
 import { resendInvitation } from "~/services/people/manage/resend-invitation.server";
+import { resetSecondFactor } from "~/services/people/second-factor/reset-second-factor.server";
 import { AppError } from "~/utils/errors";
 import { rowNumber } from "~/utils/row-number";
 
@@ -15,6 +16,7 @@ const ACTS: Record<string, PersonAct> = {
   disable: (id, _form, actor) => disablePerson(id, actor),
   enable: (id, _form, actor) => enablePerson(id, actor),
   "invite-again": (id, _form, actor) => resendInvitation(id, actor),
+  "reset-factor": (id, _form, actor) => resetSecondFactor(id, actor),
   "end-session": (id, form, actor) => endTheirSession(id, String(form.get("session")), actor),
   "end-token": (id, form, actor) => endTheirToken(id, rowNumber(String(form.get("token"))) ?? 0, actor),
 };

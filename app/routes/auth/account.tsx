@@ -1,6 +1,7 @@
 import { data, redirect } from "react-router";
 import { OwnTokens } from "~/components/account/own-tokens";
 import { PasswordForm } from "~/components/account/password-form";
+import { SecondFactor } from "~/components/account/second-factor";
 import { SessionList } from "~/components/admin/session-list";
 import { Notice } from "~/components/ui/notice";
 import { Saved } from "~/components/ui/saved";
@@ -19,6 +20,8 @@ const DONE: Record<string, string> = {
   password: "Your password is changed. Every other session of yours has ended.",
   "end-session": "The session has ended.",
   "end-others": "Every other session of yours has ended.",
+  "begin-factor": "Now let your authenticator read the picture, and type the code it shows.",
+  "end-factor": "The second factor is off.",
   "end-token": "The token is withdrawn.",
 };
 
@@ -33,21 +36,20 @@ export const action = guardedAction("own-account", async ({ request }: Route.Act
     address: requestAddress(request.headers),
   };
   try {
-    const { intent, token } = await runAccountAct(await request.formData(), person, here);
-    if (token === null) return redirect(`/account?done=${intent}`);
-    return { notice: undefined, fields: {} as Record<string, string>, token };
+    const { intent, made } = await runAccountAct(await request.formData(), person, here);
+    if (made === null) return redirect(`/account?done=${intent}`);
+    return { notice: undefined, fields: {} as Record<string, string>, ...made };
   } catch (error) {
     if (!(error instanceof AppError)) throw error;
     const { fault, init } = formFault(error);
-    return data({ ...fault, token: null }, init);
+    return data({ ...fault, token: null, recoveryCodes: null }, init);
   }
 });
 
 export default function Account({ loaderData, actionData }: Route.ComponentProps) {
-  const { name, email, sessions, tokens, roles, done } = loaderData;
+  const { name, email, sessions, tokens, roles, secondFactor, owesSecondFactor, done } = loaderData;
   const said = done === null ? undefined : DONE[done];
   const fields = actionData?.fields ?? {};
-  const token = actionData?.token ?? null;
   return (
     <>
       {said && !actionData && <Saved>{said}</Saved>}
@@ -55,11 +57,17 @@ export default function Account({ loaderData, actionData }: Route.ComponentProps
       <p className="mt-1 text-soft [overflow-wrap:anywhere]">
         {name}, {email}. Times are UTC.
       </p>
+      {owesSecondFactor && (
+        <Notice className="mt-4">
+          You are a manager: set up a second factor here first. Then everything else opens.
+        </Notice>
+      )}
       {actionData?.notice && <Notice className="mt-4">{actionData.notice}</Notice>}
       <div className="mt-6 grid items-start gap-4 lg:grid-cols-2">
+        <SecondFactor {...secondFactor} errors={fields} recoveryCodes={actionData?.recoveryCodes ?? null} />
         <PasswordForm key={said} errors={fields} />
         <SessionList sessions={sessions} endOthers />
-        <OwnTokens tokens={tokens} roles={roles} errors={fields} made={token} />
+        <OwnTokens tokens={tokens} roles={roles} errors={fields} made={actionData?.token ?? null} />
       </div>
     </>
   );

@@ -26,7 +26,7 @@ export const action = publicAction(async ({ request, url }: Route.ActionArgs) =>
   try {
     const form = Object.fromEntries(await request.formData());
     const personId = await setUpManager(form, requestAddress(request.headers));
-    const id = await startSession(personId, readSessionId(request.headers));
+    const id = await startSession(personId, readSessionId(request.headers), request.headers);
     return redirect("/", { headers: { "Set-Cookie": sessionCookie(id, { secure: isSecure(url) }) } });
   } catch (error) {
     if (!(error instanceof AppError)) throw error;

@@ -5,7 +5,7 @@ import { signIn } from "~/services/people/sign-in.server";
 import { AppError } from "~/utils/errors";
 import { ownPath } from "~/utils/http-own-path";
 import { isSecure } from "~/utils/request-is-secure";
-import { sessionCookie } from "~/utils/session-cookie";
+import { halfCookie, sessionCookie } from "~/utils/session-cookie";
 import type { Route } from "./+types/sign-in";
 import { DemoChoices } from "./demo-choices";
 import { Door } from "./door";
@@ -26,9 +26,11 @@ export const loader = publicLoader(async ({ url }: Route.LoaderArgs, findPerson)
 
 export const action = publicAction(async ({ request, url }: Route.ActionArgs) => {
   try {
-    const id = await signIn(request);
-    const cookie = sessionCookie(id, { secure: isSecure(url) });
-    return redirect(ownPath(url.searchParams.get("to")), { headers: { "Set-Cookie": cookie } });
+    const { id, isHalf } = await signIn(request);
+    const secure = { secure: isSecure(url) };
+    const cookie = isHalf ? halfCookie(id, secure) : sessionCookie(id, secure);
+    const to = isHalf ? `/sign-in/code${url.search}` : ownPath(url.searchParams.get("to"));
+    return redirect(to, { headers: { "Set-Cookie": cookie } });
   } catch (error) {
     if (!(error instanceof AppError)) throw error;
     const { fault, init } = formFault(error);

@@ -28,7 +28,7 @@ export const loader = publicLoader(async ({ params }: Route.LoaderArgs) => ({
 export const action = publicAction(async ({ request, params, url }: Route.ActionArgs) => {
   try {
     const personId = await acceptInvitation(params.token, Object.fromEntries(await request.formData()));
-    const id = await startSession(personId, readSessionId(request.headers));
+    const id = await startSession(personId, readSessionId(request.headers), request.headers);
     return redirect("/", { headers: { "Set-Cookie": sessionCookie(id, { secure: isSecure(url) }) } });
   } catch (error) {
     if (!(error instanceof AppError)) throw error;

@@ -11,6 +11,15 @@ export const changePasswordSchema = z.object({
   password: newPasswordSchema,
 });
 
+/** The code that is typed after the password, or a recovery code. */
+export const codeSchema = z.object({
+  code: z
+    .string({ error: "Type the code." })
+    .trim()
+    .min(1, "Type the code.")
+    .max(40, "That is too long for a code."),
+});
+
 /** The form that makes a token of one's own. */
 export const ownTokenSchema = z.object({
   name: z

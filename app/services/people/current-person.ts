@@ -8,4 +8,6 @@ export interface CurrentPerson {
   email: string | null;
   roles: Role[];
   via: "session" | "token";
+  /** A manager who has to set up a second factor before anything else; the demo firm asks for none. */
+  owesSecondFactor?: true;
 }

@@ -11,6 +11,7 @@ interface AskerRow {
   email: string | null;
   role: Role | null;
   stale?: number;
+  lacksFactor?: number;
 }
 
 /**
@@ -47,10 +48,13 @@ async function findBySession(id: string): Promise<CurrentPerson | null> {
   const hash = hashSecret(id);
   const rows = await readRows<AskerRow>(
     `SELECT person.id, person.name, person.email, person_role.role,
-            session.seen_at < NOW(3) - INTERVAL 5 MINUTE AS stale
+            session.seen_at < NOW(3) - INTERVAL 5 MINUTE AS stale,
+            second_factor.confirmed_at IS NULL
+              AND NOT EXISTS (SELECT 1 FROM setting WHERE setting.name = 'demo' AND setting.value = 'true') AS lacksFactor
        FROM session
        JOIN person ON person.id = session.person_id
        LEFT JOIN person_role ON person_role.person_id = person.id
+       LEFT JOIN second_factor ON second_factor.person_id = person.id
       WHERE session.id_hash = :hash AND session.expires_at > NOW(3)
         AND session.seen_at > NOW(3) - INTERVAL 12 HOUR AND person.disabled_at IS NULL`,
     { hash },
@@ -61,7 +65,8 @@ async function findBySession(id: string): Promise<CurrentPerson | null> {
 
 function present(rows: AskerRow[], via: CurrentPerson["via"]): CurrentPerson | null {
   if (rows.length === 0) return null;
-  const [{ id, name, email }] = rows;
+  const [{ id, name, email, lacksFactor }] = rows;
   const roles = new Set(rows.flatMap(({ role }) => (role === null ? [] : [role])));
-  return { id, name, email, roles: [...roles], via };
+  const asker = { id, name, email, roles: [...roles], via };
+  return lacksFactor && roles.has("manager") ? { ...asker, owesSecondFactor: true } : asker;
 }

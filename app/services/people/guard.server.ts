@@ -20,7 +20,15 @@ function declare<A, T>(act: Act | "public", run: (args: A) => Promise<T>): Guard
 }
 
 async function personWhoMay(args: Args, act: Act): Promise<CurrentPerson> {
-  return assertMay(await args.context.get(personContext)(), act);
+  const person = assertMay(await args.context.get(personContext)(), act);
+  if (person.owesSecondFactor && act !== "own-account") throw owesSecondFactor();
+  return person;
+}
+
+const SECOND_FACTOR = "A manager sets up a second factor at their account before anything else.";
+
+function owesSecondFactor(): AppError {
+  return new AppError("forbidden", SECOND_FACTOR);
 }
 
 /** The problem of an error; faults of ours go to the log under the request's id. */
@@ -38,6 +46,7 @@ function throwForPage(error: unknown, args: Args): never {
     const { pathname, search } = args.url;
     throw redirect(pathname === "/" ? "/sign-in" : `/sign-in?to=${encodeURIComponent(pathname + search)}`);
   }
+  if (error instanceof AppError && error.message === SECOND_FACTOR) throw redirect("/account");
   const problem = answerTo(error, args);
   const headers =
     problem.retryAfter === undefined ? undefined : { "Retry-After": String(problem.retryAfter) };

@@ -1,5 +1,6 @@
 import { Op } from "sequelize";
 import { inTransaction } from "~/db/in-transaction.server";
+import { HalfSignIn } from "~/db/models/people/half-sign-in";
 import { Person } from "~/db/models/people/person";
 import { Session } from "~/db/models/people/session";
 import { changePasswordSchema } from "~/schemas/people/account";
@@ -31,6 +32,7 @@ export async function changePassword(input: unknown, person: CurrentPerson, here
   const passwordHash = await hashPassword(password);
   return inTransaction(async (transaction) => {
     await Person.update({ passwordHash }, { where: { id }, transaction });
+    await HalfSignIn.destroy({ where: { personId: id }, transaction });
     const others = { personId: id, idHash: { [Op.ne]: hashSecret(here.sessionId) } };
     const sessionsEnded = await Session.destroy({ where: others, transaction });
     await withdrawLinks(id, transaction);

@@ -1,6 +1,7 @@
 import { ROLES, type Role } from "~/schemas/people/role";
 import type { CurrentPerson } from "../current-person";
 import { getPersonPage, type ListedSession, type ListedToken } from "../manage/get-person-page.server";
+import { getSecondFactor, type SecondFactorFacts } from "../second-factor/get-second-factor.server";
 import { hashSecret } from "../secret.server";
 import { ownId } from "./own-id";
 
@@ -9,6 +10,9 @@ interface Account {
   email: string | null;
   sessions: (ListedSession & { isThis: boolean })[];
   tokens: ListedToken[];
+  secondFactor: SecondFactorFacts;
+  /** Nothing else can be done before it is set up. */
+  owesSecondFactor: boolean;
   /** That a token of theirs may have. */
   roles: Role[];
 }
@@ -22,6 +26,8 @@ export async function getAccount(person: CurrentPerson, sessionId: string): Prom
     email: person.email,
     sessions: sessions.map((session) => ({ ...session, isThis: session.key === key })),
     tokens,
+    secondFactor: await getSecondFactor(person),
+    owesSecondFactor: person.owesSecondFactor ?? false,
     roles: person.roles.includes("manager") ? [...ROLES] : person.roles,
   };
 }

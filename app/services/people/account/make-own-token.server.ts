@@ -12,10 +12,12 @@ import { ownId } from "./own-id";
  * Makes a token that does what one of one's own roles may, as long as one has it.
  * @param input the form's fields: name, role
  * @returns the token, which is shown once; only its hash is kept
- * @throws AppError `invalid` with errors by field
+ * @throws AppError `invalid` with errors by field, `conflict` for a manager who owes a second factor
  */
 export async function makeOwnToken(input: unknown, person: CurrentPerson): Promise<string> {
   const personId = ownId(person);
+  if (person.owesSecondFactor)
+    throw new AppError("conflict", "Set up your second factor first, then make tokens.");
   const { name, role } = parseInput(ownTokenSchema, input);
   if (!person.roles.includes(role) && !person.roles.includes("manager")) {
     const message = "A token can have only a role that you have.";

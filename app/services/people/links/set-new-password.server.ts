@@ -1,4 +1,5 @@
 import { inTransaction } from "~/db/in-transaction.server";
+import { HalfSignIn } from "~/db/models/people/half-sign-in";
 import { Session } from "~/db/models/people/session";
 import { choosePasswordSchema } from "~/schemas/people/person";
 import { appendAuditEvent } from "~/services/audit/append-audit-event.server";
@@ -17,6 +18,7 @@ export async function setNewPassword(secret: string, input: unknown): Promise<vo
   await inTransaction(async (transaction) => {
     const person = await useLink(secret, "password", transaction);
     await person.update({ passwordHash }, { transaction });
+    await HalfSignIn.destroy({ where: { personId: person.id }, transaction });
     const ended = await Session.destroy({ where: { personId: person.id }, transaction });
     const after = { password: "changed", sessionsEnded: ended };
     const subject = `person ${person.id}`;

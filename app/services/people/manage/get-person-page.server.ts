@@ -6,6 +6,8 @@ import { findPeople, type ListedPerson } from "./find-people.server";
 export interface ListedSession {
   /** The beginning of its hash: enough to name it, nothing to sign in with. */
   key: string;
+  browser: string | null;
+  address: string | null;
   createdAt: string;
   seenAt: string;
 }
@@ -23,6 +25,7 @@ interface PersonPage {
   tokens: ListedToken[];
   /** Until when the invitation works, ISO; null where none does. */
   invitedUntil: string | null;
+  hasSecondFactor: boolean;
 }
 
 /**
@@ -32,9 +35,9 @@ interface PersonPage {
 export async function getPersonPage(id: number): Promise<PersonPage> {
   const [person] = await findPeople(id);
   if (!person) throw new AppError("not-found", "There is nobody with this number.");
-  const [sessions, tokens, links] = await Promise.all([
-    readRows<{ key: string; createdAt: Date; seenAt: Date }>(
-      `SELECT LEFT(id_hash, 16) AS \`key\`, created_at AS createdAt, seen_at AS seenAt FROM session
+  const [sessions, tokens, links, factors] = await Promise.all([
+    readRows<{ key: string; browser: string | null; address: string | null; createdAt: Date; seenAt: Date }>(
+      `SELECT LEFT(id_hash, 16) AS \`key\`, browser, address, created_at AS createdAt, seen_at AS seenAt FROM session
         WHERE person_id = :id AND expires_at > NOW(3) AND seen_at > NOW(3) - INTERVAL 12 HOUR
         ORDER BY seen_at DESC, id_hash`,
       { id },
@@ -45,15 +48,20 @@ export async function getPersonPage(id: number): Promise<PersonPage> {
           AND used_at IS NULL AND withdrawn_at IS NULL AND expires_at > NOW(3)`,
       { id },
     ),
+    readRows<{ one: number }>(
+      "SELECT 1 AS one FROM second_factor WHERE person_id = :id AND confirmed_at IS NOT NULL",
+      { id },
+    ),
   ]);
   return {
     person,
-    sessions: sessions.map(({ key, createdAt, seenAt }) => ({
-      key,
+    sessions: sessions.map(({ createdAt, seenAt, ...row }) => ({
+      ...row,
       createdAt: new Date(createdAt).toISOString(),
       seenAt: new Date(seenAt).toISOString(),
     })),
     tokens,
+    hasSecondFactor: factors.length > 0,
     invitedUntil: links[0]?.until ? new Date(links[0].until).toISOString() : null,
   };
 }
