@@ -16,7 +16,7 @@ export default defineConfig({
               groups: [
                 {
                   name: "base",
-                  test: /node_modules[\\/](react|react-dom|react-router|scheduler|@tanstack|turbo-stream|cookie)[\\/]/,
+                  test: /node_modules[\\/](react|react-dom|react-router|scheduler|turbo-stream|cookie|@tanstack[\\/](react-query|query-core))[\\/]/,
                 },
                 {
                   name: "shell",
