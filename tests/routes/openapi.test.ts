@@ -6,6 +6,7 @@ import { ALL_API_ROUTES } from "~/schemas/api/all-api-routes";
 import { makeOpenapi } from "~/services/api/make-openapi";
 import { createToken } from "~/services/people/create-token.server";
 import { bring } from "../services/imports/import-support";
+import { newKey } from "../services/stock/stock-builders";
 import { useTestDatabase } from "../support/database";
 import { makeBuild, OURS, readRoutes, startApplication } from "./application";
 
@@ -44,14 +45,21 @@ beforeEach(async () => {
   await bring("kit-orders", "number,kit,priority\nKO-1,KIT,1\nKO-2,KIT,2\nKO-3,KIT,3\nKO-4,KIT,4\n");
 });
 
+interface Init {
+  body?: string;
+  type?: string;
+  key?: string;
+}
+
 /** Sends a request and holds the answer against what the document says of that status. */
-async function askAndCompare(operation: string, path: string, init: { body?: string; type?: string } = {}) {
+async function askAndCompare(operation: string, path: string, init: Init = {}) {
   const entry = ALL_API_ROUTES.find(({ id }) => id === operation);
   if (!entry) throw new Error(`The document has no operation ${operation}.`);
   const headers = {
     ...OURS,
     Authorization: `Bearer ${await createToken({ role: "manager", name: "document" })}`,
     ...(init.body !== undefined && { "Content-Type": init.type ?? "application/json" }),
+    ...(init.key !== undefined && { "Idempotency-Key": init.key }),
   };
   const response = await application(path, { method: entry.method.toUpperCase(), headers, body: init.body });
   const body = await response.json();
@@ -108,6 +116,8 @@ describe("the document of the JSON routes", () => {
     ["getPart", "/api/parts/BOLT"],
     ["getStructure", "/api/structure/KIT"],
     ["getWhereUsed", "/api/where-used/BOLT"],
+    ["findMovements", "/api/movements?partNumber=BOLT"],
+    ["findBalances", "/api/stock?bin=A1"],
     ["getHealth", "/api/health"],
     ["getOpenapi", "/api/openapi.json"],
   ])("says what %s answers to %s", async (operation, path) => {
@@ -126,6 +136,26 @@ describe("the document of the JSON routes", () => {
     ]) {
       expect(await askAndCompare(operation, path, { body, type })).toMatchObject({ status: 200, faults: [] });
     }
+  });
+
+  it("says what posting and reversing answer, and how they refuse", async () => {
+    const movement = {
+      kind: "receive",
+      partNumber: "BOLT",
+      quantity: "2",
+      to: { bin: "A1", state: "usable" },
+    };
+    const body = JSON.stringify({ movements: [movement] });
+    const posted = await askAndCompare("postMovements", "/api/movements", { body, key: newKey() });
+    expect(posted).toMatchObject({ status: 201, faults: [] });
+    const address = `/api/movements/${posted.body.movements[0].id}/reverse`;
+    const reason = { body: JSON.stringify({ reason: "wrong part" }) };
+    for (const status of [201, 409])
+      expect(await askAndCompare("reverseMovement", address, reason)).toMatchObject({ status, faults: [] });
+    expect(await askAndCompare("postMovements", "/api/movements", { body })).toMatchObject({
+      status: 400,
+      faults: [],
+    });
   });
 
   it.each([

@@ -5,6 +5,7 @@ import { createPersonLinks } from "./create-person-links";
 import { createSecondFactors } from "./create-second-factors";
 import { createStock } from "./create-stock";
 import { createSystem } from "./create-system";
+import { indexMovements } from "./index-movements";
 import type { Migration } from "./migration";
 import { refuseChangedFacts } from "./refuse-changed-facts";
 
@@ -18,4 +19,5 @@ export const ALL_MIGRATIONS: readonly Migration[] = [
   refuseChangedFacts,
   createPersonLinks,
   createSecondFactors,
+  indexMovements,
 ];

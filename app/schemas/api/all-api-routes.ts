@@ -9,6 +9,7 @@ import { effectsRoutes } from "./planning/effects";
 import { shipCheckRoutes } from "./planning/ship-check";
 import { shipLineRoutes } from "./planning/ship-line";
 import { whyRoutes } from "./planning/why";
+import { movementsRoutes } from "./stock/movements";
 import { healthRoutes } from "./system/health";
 import { openapiRoutes } from "./system/openapi";
 
@@ -22,6 +23,7 @@ export const ALL_API_ROUTES: readonly ApiRoute[] = [
   ...findRoutes,
   ...partsRoutes,
   ...structureRoutes,
+  ...movementsRoutes,
   ...importsRoutes,
   ...exportsRoutes,
   ...healthRoutes,

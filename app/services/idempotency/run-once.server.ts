@@ -2,6 +2,7 @@ import { QueryTypes, type Transaction, UniqueConstraintError } from "sequelize";
 import { sequelize } from "~/db/client.server";
 import { inTransaction } from "~/db/in-transaction.server";
 import { AppError } from "~/utils/errors";
+import { assertKey } from "./assert-key";
 
 interface Once {
   /** Made by the client before sending: 8 to 200 visible ASCII characters. */
@@ -21,7 +22,6 @@ interface StoredKey {
 
 class KeyTaken extends Error {}
 
-const KEY = /^[\x21-\x7e]{8,200}$/;
 const WAIT_SECONDS = 2;
 const LOCK_WAIT_TIMEOUT = 1205;
 
@@ -36,12 +36,7 @@ export async function runOnce<Result>(
   once: Once,
   work: (transaction: Transaction, keyId: number) => Promise<Result>,
 ): Promise<Result> {
-  if (!KEY.test(once.key)) {
-    throw new AppError(
-      "bad-request",
-      "Send an Idempotency-Key of 8 to 200 visible characters without spaces.",
-    );
-  }
+  assertKey(once.key);
   try {
     return await attempt(once, work);
   } catch (error) {
